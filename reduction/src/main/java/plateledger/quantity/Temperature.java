@@ -1,0 +1,28 @@
+package plateledger.quantity;
+
+/**
+ * A thermodynamic temperature in K. Only this type knows the Celsius offset; a temperature difference is a double named
+ * {@code …DiffK}.
+ *
+ * @param kelvin the temperature, K, finite and above 0
+ */
+public record Temperature(double kelvin) {
+    private static final double CELSIUS_ZERO_K = 273.15; // exact, SI Brochure 9th ed.
+
+    /** Refuses values that are not finite and above 0 K (NaN included). */
+    public Temperature {
+        if (!(kelvin > 0.0) || Double.isInfinite(kelvin)) {
+            throw new IllegalArgumentException("temperature must be finite and above 0 K, found " + kelvin + " K");
+        }
+    }
+
+    /** The temperature for a reading in °C. */
+    public static Temperature ofCelsius(double celsius) {
+        return new Temperature(celsius + CELSIUS_ZERO_K);
+    }
+
+    /** This temperature in °C. */
+    public double celsius() {
+        return kelvin - CELSIUS_ZERO_K;
+    }
+}
