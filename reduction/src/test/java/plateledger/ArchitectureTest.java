@@ -21,6 +21,7 @@ final class ArchitectureTest {
     private static final Map<String, Set<String>> MAY_USE = Map.ofEntries(
             entry("quantity", Set.of()),
             entry("finding", Set.of()),
+            entry("fluid", Set.of("quantity", "numeric", "finding")),
             entry("uncertainty", Set.of("quantity", "numeric", "finding")),
             entry("log", Set.of("quantity", "numeric", "finding")),
             entry("rig", Set.of("keyfile", "fluid", "uncertainty", "quantity", "finding")),
