@@ -22,12 +22,14 @@ final class ArchitectureTest {
             entry("quantity", Set.of()),
             entry("finding", Set.of()),
             entry("fluid", Set.of("quantity", "numeric", "finding")),
+            entry("numeric", Set.of()),
             entry("uncertainty", Set.of("quantity", "numeric", "finding")),
             entry("log", Set.of("quantity", "numeric", "finding")),
             entry("rig", Set.of("keyfile", "fluid", "uncertainty", "quantity", "finding")),
             entry(
                     "campaign",
                     Set.of("keyfile", "log", "rig", "fluid", "uncertainty", "expression", "quantity", "finding")),
+            entry("theory", Set.of("expression", "fluid", "numeric", "quantity", "finding")),
             entry("steady", Set.of("log", "sensor", "rig", "uncertainty", "numeric", "quantity", "finding")),
             entry("fit", Set.of("expression", "uncertainty", "numeric", "quantity", "finding")),
             entry(
