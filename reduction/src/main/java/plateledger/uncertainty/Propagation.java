@@ -39,7 +39,7 @@ public final class Propagation {
     private Propagation(SparseModel model, InputList inputs) {
         if (model.inputs() != inputs.size()) {
             throw new IllegalArgumentException(
-                    "the model has %d inputs, the list %d".formatted(model.inputs(), inputs.size()));
+                    "the model has " + model.inputs() + " inputs, the list " + inputs.size());
         }
         this.model = model;
         this.inputs = inputs;
