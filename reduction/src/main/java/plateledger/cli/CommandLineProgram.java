@@ -1,0 +1,93 @@
+package plateledger.cli;
+
+import java.io.Console;
+import java.io.FileDescriptor;
+import java.io.FileOutputStream;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import picocli.AutoComplete;
+import picocli.CommandLine;
+import picocli.CommandLine.Help.Ansi;
+import plateledger.audit.Program;
+
+/** The program as called from a command line. */
+public final class CommandLineProgram {
+    private CommandLineProgram() {}
+
+    /**
+     * Runs the program on the process's own streams.
+     *
+     * @param args arguments
+     * @return exit status, see {@link ExitStatus}
+     */
+    public static int run(String... args) {
+        PrintWriter out = writer(FileDescriptor.out);
+        PrintWriter err = writer(FileDescriptor.err);
+        int status = run(new Terminal(out, err, personWatches()), args);
+        out.flush();
+        err.flush();
+        return status;
+    }
+
+    /**
+     * Runs the program.
+     *
+     * @param terminal where it speaks
+     * @param args arguments
+     * @return exit status, see {@link ExitStatus}
+     */
+    public static int run(Terminal terminal, String... args) {
+        CommandLine line = commandLine(terminal);
+        if (args.length == 0) {
+            line.usage(terminal.out());
+            terminal.out().flush();
+            return ExitStatus.DONE;
+        }
+        return line.execute(args);
+    }
+
+    /** The commands with their options; for help and completion too. */
+    static CommandLine commandLine(Terminal terminal) {
+        CommandLine line = new CommandLine(new RootCommand());
+        line.addSubcommand("completion", new AutoComplete.GenerateCompletion());
+        line.setOut(terminal.out());
+        line.setErr(terminal.err());
+        line.setColorScheme(CommandLine.Help.defaultColorScheme(Ansi.OFF));
+        line.setUsageHelpWidth(100);
+        line.setCaseInsensitiveEnumValuesAllowed(true);
+        line.getCommandSpec().version("plateledger " + Program.versionOnly());
+        line.getCommandSpec().exitCodeOnInvalidInput(ExitStatus.NOTHING_WRITTEN);
+        line.setExecutionExceptionHandler((e, command, parsed) -> {
+            terminal.err().println("Fault in the program: " + e);
+            for (StackTraceElement frame : e.getStackTrace()) {
+                terminal.err().println("    at " + frame);
+            }
+            terminal.err().println("Please report this with the lines above; nothing was written.");
+            return ExitStatus.FAULT;
+        });
+        for (CommandLine sub : line.getSubcommands().values()) {
+            sub.getCommandSpec().exitCodeOnExecutionException(ExitStatus.FAULT);
+        }
+        return line;
+    }
+
+    /** True if input and output are a terminal; on Java 22 and later a console exists without one and must be asked. */
+    @SuppressWarnings("SystemConsoleNull") // asked below
+    private static boolean personWatches() {
+        Console console = System.console();
+        if (console == null) {
+            return false;
+        }
+        try {
+            return Boolean.TRUE.equals(Console.class.getMethod("isTerminal").invoke(console));
+        } catch (NoSuchMethodException before22) {
+            return true;
+        } catch (ReflectiveOperationException e) {
+            return false;
+        }
+    }
+
+    private static PrintWriter writer(FileDescriptor descriptor) {
+        return new PrintWriter(new FileOutputStream(descriptor), true, StandardCharsets.UTF_8);
+    }
+}
