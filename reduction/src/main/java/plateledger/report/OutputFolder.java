@@ -120,8 +120,8 @@ public final class OutputFolder {
             deleteIfPossible(fresh);
             throw why;
         }
+        boolean hadFormer = Files.exists(target, LinkOption.NOFOLLOW_LINKS);
         try {
-            boolean hadFormer = Files.exists(target, LinkOption.NOFOLLOW_LINKS);
             if (hadFormer) {
                 Files.move(target, former, StandardCopyOption.ATOMIC_MOVE);
             }
@@ -137,7 +137,9 @@ public final class OutputFolder {
             deleteIfPossible(fresh);
             throw notWritable(e);
         }
-        deleteIfPossible(former);
+        if (hadFormer) { // otherwise a folder of that name is somebody else's
+            deleteIfPossible(former);
+        }
     }
 
     private void clearFresh() throws IOException, RefusedException {
