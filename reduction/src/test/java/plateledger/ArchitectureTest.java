@@ -44,6 +44,7 @@ final class ArchitectureTest {
             entry("numeric", Set.of()),
             entry("uncertainty", Set.of("quantity", "numeric", "finding")),
             entry("log", Set.of("quantity", "numeric", "finding")),
+            entry("keyfile", Set.of("quantity", "finding")),
             entry("rig", Set.of("keyfile", "fluid", "uncertainty", "quantity", "finding")),
             entry(
                     "campaign",

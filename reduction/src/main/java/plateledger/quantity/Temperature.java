@@ -18,11 +18,21 @@ public record Temperature(double kelvin) {
 
     /** The temperature for a reading in °C. */
     public static Temperature ofCelsius(double celsius) {
-        return new Temperature(celsius + CELSIUS_ZERO_K);
+        return new Temperature(celsiusToKelvin(celsius));
+    }
+
+    /** K for °C without any check, for readings that may be nonsense. */
+    static double celsiusToKelvin(double celsius) {
+        return celsius + CELSIUS_ZERO_K;
+    }
+
+    /** °C for K without any check. */
+    static double kelvinToCelsius(double kelvin) {
+        return kelvin - CELSIUS_ZERO_K;
     }
 
     /** This temperature in °C. */
     public double celsius() {
-        return kelvin - CELSIUS_ZERO_K;
+        return kelvinToCelsius(kelvin);
     }
 }
