@@ -46,6 +46,11 @@ final class DryAir {
     private record Residual(double factor, double t, int d, int l) {
         double value(double lnTau, double delta) {
             double term = factor * power(delta, d);
+            // High powers of δ vanish at the densities of a wind tunnel: 1e-10 µPa s or mW/(m K) is 1e-11 of the
+            // result.
+            if (Math.abs(term) < 1e-10) {
+                return 0.0;
+            }
             if (t != 0.0) {
                 term *= Math.exp(t * lnTau);
             }
@@ -53,25 +58,18 @@ final class DryAir {
         }
     }
 
-    /** Second virial coefficient B, m³/mol, at T in K. */
-    static double secondVirial(double t) {
+    /** Second virial coefficient of air with itself at T in K. */
+    static Virial virial(double t) {
         double lnTau = Math.log(T_REDUCING / t);
-        double sum = 0.0;
-        for (int i = 0; i < B_FACTOR.length; i++) {
-            sum += B_FACTOR[i] * Math.exp(B_EXPONENT[i] * lnTau);
-        }
-        return sum / RHO_REDUCING;
-    }
-
-    /** T² d²B/dT², m³/mol. */
-    static double secondVirialCurvature(double t) {
-        double lnTau = Math.log(T_REDUCING / t);
-        double sum = 0.0;
+        double value = 0.0;
+        double curvature = 0.0;
         for (int i = 0; i < B_FACTOR.length; i++) {
             double m = B_EXPONENT[i];
-            sum += m * (m + 1.0) * B_FACTOR[i] * Math.exp(m * lnTau);
+            double term = B_FACTOR[i] * Math.exp(m * lnTau);
+            value += term;
+            curvature += m * (m + 1.0) * term;
         }
-        return sum / RHO_REDUCING;
+        return new Virial(value / RHO_REDUCING, curvature / RHO_REDUCING);
     }
 
     /** Ideal-gas molar heat capacity ÷ R, the form of the 2000 paper. */

@@ -59,21 +59,21 @@ public final class MoistAir {
         double rt = GAS_CONSTANT * temperatureK;
         double molarMass = xa * DryAir.MOLAR_MASS + xv * WaterVapour.MOLAR_MASS;
 
-        double airVirial = DryAir.secondVirial(temperatureK);
-        double airMolarDensity = pressurePa / (rt + airVirial * pressurePa);
+        Virial air = DryAir.virial(temperatureK);
+        double airMolarDensity = pressurePa / (rt + air.value() * pressurePa);
         double airViscosity = DryAir.viscosity(temperatureK, airMolarDensity);
         double airConductivity = DryAir.conductivity(temperatureK, airMolarDensity);
 
-        double virial = xa * xa * airVirial;
-        double curvature = xa * xa * DryAir.secondVirialCurvature(temperatureK);
+        double virial = xa * xa * air.value();
+        double curvature = xa * xa * air.curvature();
         double heat = xa * GAS_CONSTANT * DryAir.idealHeatCapacityOverR(temperatureK);
         double viscosity = airViscosity;
         double conductivity = airConductivity;
         if (xv > 0.0) {
-            virial += 2.0 * xa * xv * WaterVapour.crossVirial(temperatureK)
-                    + xv * xv * WaterVapour.secondVirial(temperatureK);
-            curvature += 2.0 * xa * xv * WaterVapour.crossVirialCurvature(temperatureK)
-                    + xv * xv * WaterVapour.secondVirialCurvature(temperatureK);
+            Virial cross = WaterVapour.crossVirial(temperatureK);
+            Virial water = WaterVapour.virial(temperatureK);
+            virial += 2.0 * xa * xv * cross.value() + xv * xv * water.value();
+            curvature += 2.0 * xa * xv * cross.curvature() + xv * xv * water.curvature();
             heat += xv * WaterVapour.MOLAR_MASS * WaterVapour.idealHeatCapacity(temperatureK);
             double vapourViscosity = WaterVapour.viscosity(temperatureK);
             double root = Math.sqrt(airViscosity / vapourViscosity);

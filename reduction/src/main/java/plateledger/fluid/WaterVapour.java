@@ -21,46 +21,32 @@ final class WaterVapour {
 
     private WaterVapour() {}
 
-    /** Cross virial coefficient B_aw, m³/mol. */
-    static double crossVirial(double t) {
+    /** Cross virial coefficient with air, B_av. */
+    static Virial crossVirial(double t) {
         double ln = Math.log(t / 100.0);
-        double sum = 0.0;
-        for (int i = 0; i < CROSS_FACTOR.length; i++) {
-            sum += CROSS_FACTOR[i] * Math.exp(CROSS_EXPONENT[i] * ln);
-        }
-        return sum * 1e-6;
-    }
-
-    /** T² d²B_aw/dT², m³/mol. */
-    static double crossVirialCurvature(double t) {
-        double ln = Math.log(t / 100.0);
-        double sum = 0.0;
+        double value = 0.0;
+        double curvature = 0.0;
         for (int i = 0; i < CROSS_FACTOR.length; i++) {
             double n = CROSS_EXPONENT[i];
-            sum += n * (n - 1.0) * CROSS_FACTOR[i] * Math.exp(n * ln);
+            double term = CROSS_FACTOR[i] * 1e-6 * Math.exp(n * ln);
+            value += term;
+            curvature += n * (n - 1.0) * term;
         }
-        return sum * 1e-6;
+        return new Virial(value, curvature);
     }
 
     /**
-     * Second virial coefficient B_vv, m³/mol: a compact fit to IAPWS-95 over 273.16–523 K, within 0.07 % of it (and within
-     * 3e-4 of the values printed in IAPWS G9-12 at 300 and 400 K).
+     * Second virial coefficient with itself, B_vv: a compact fit to IAPWS-95 over 273.16–523 K, within 0.07 % of it (and
+     * within 3e-4 of the values printed in IAPWS G9-12 at 300 and 400 K).
      */
-    static double secondVirial(double t) {
-        return -1e-3 * Math.exp(exponent(t / 100.0));
-    }
-
-    /** T² d²B_vv/dT², m³/mol. */
-    static double secondVirialCurvature(double t) {
+    static Virial virial(double t) {
         double s = t / 100.0;
-        double first = 20.4446 / (s * s) - 2.0 * 69.7687 / (s * s * s) + 3.0 * 45.2846 / (s * s * s * s) - 0.518461;
-        double second =
-                -2.0 * 20.4446 / (s * s * s) + 6.0 * 69.7687 / (s * s * s * s) - 12.0 * 45.2846 / (s * s * s * s * s);
-        return s * s * secondVirial(t) * (first * first + second);
-    }
-
-    private static double exponent(double s) {
-        return 2.47851 - 20.4446 / s + 69.7687 / (s * s) - 45.2846 / (s * s * s) - 0.518461 * s;
+        double r = 1.0 / s;
+        double value = -1e-3 * Math.exp(2.47851 + r * (-20.4446 + r * (69.7687 - r * 45.2846)) - 0.518461 * s);
+        // First and second derivative of the exponent with respect to T/100 K.
+        double first = r * r * (20.4446 + r * (-2.0 * 69.7687 + r * 3.0 * 45.2846)) - 0.518461;
+        double second = r * r * r * (-2.0 * 20.4446 + r * (6.0 * 69.7687 - r * 12.0 * 45.2846));
+        return new Virial(value, s * s * value * (first * first + second));
     }
 
     /** Ideal-gas heat capacity, J/(kg K), ideal part of IAPWS-95. */
