@@ -23,8 +23,8 @@ public record Air(double density, double viscosity, double conductivity, double 
     public FluidState at(double temperatureK, double pressurePa, double vapourFraction) {
         FluidState s = MoistAir.state(temperatureK, pressurePa, vapourFraction);
         if (Double.isNaN(s.density())) {
-            throw new IllegalArgumentException("no air properties at %s K, %s Pa, x_v %s"
-                    .formatted(temperatureK, pressurePa, vapourFraction));
+            throw new IllegalArgumentException(
+                    "no air properties at %s K, %s Pa, x_v %s".formatted(temperatureK, pressurePa, vapourFraction));
         }
         return new FluidState(
                 s.density() * density,

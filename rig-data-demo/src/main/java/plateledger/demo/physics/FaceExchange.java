@@ -31,7 +31,7 @@ final class FaceExchange {
             for (int j = i; j >= 0; j--) {
                 double sum = convection[i][j] + (i == j ? radiation : 0.0);
                 for (int k = j + 1; k <= i; k++) {
-                    sum -= s[i][k] * resistance * (convection[k][j]);
+                    sum -= s[i][k] * resistance * convection[k][j];
                 }
                 s[i][j] = sum / (1.0 + resistance * (convection[j][j] + radiation));
             }

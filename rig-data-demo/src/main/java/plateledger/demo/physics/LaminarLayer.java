@@ -13,11 +13,23 @@ public final class LaminarLayer {
     private final double[][] low;
     private final double[][] high;
 
-    /** The layer over a grid whose heated part starts at the first face (&gt; 0, the unheated length). */
-    public LaminarLayer(double[] faces) {
-        BlasiusFlow flow = new BlasiusFlow();
-        low = matrix(flow, PRANDTL_LOW, faces);
-        high = matrix(flow, PRANDTL_HIGH, faces);
+    /** The marched step responses, the same for all geometries: made once, shared. */
+    public static final class Responses {
+        private final FluxStepResponse low;
+        private final FluxStepResponse high;
+
+        /** Marches the responses for x/ξ up to {@code reach}. */
+        public Responses(double reach) {
+            BlasiusFlow flow = new BlasiusFlow();
+            low = new FluxStepResponse(flow, PRANDTL_LOW, reach);
+            high = new FluxStepResponse(flow, PRANDTL_HIGH, reach);
+        }
+    }
+
+    /** The layer over a grid whose heated part starts at the first face (&gt; 0, the unheated length), m. */
+    public LaminarLayer(Responses responses, double[] faces) {
+        low = matrix(responses.low, faces);
+        high = matrix(responses.high, faces);
     }
 
     /**
@@ -41,14 +53,13 @@ public final class LaminarLayer {
     }
 
     /** The matrix in units of k √(U/ν) for one Prandtl number. */
-    static double[][] matrix(BlasiusFlow flow, double prandtl, double[] faces) {
-        return invertLower(response(flow, prandtl, faces));
+    static double[][] matrix(FluxStepResponse step, double[] faces) {
+        return invertLower(response(step, faces));
     }
 
     /** Wall temperature at the cell centres for unit flux in each cell, in units of (1/k) √(ν/U). */
-    static double[][] response(BlasiusFlow flow, double prandtl, double[] faces) {
+    static double[][] response(FluxStepResponse step, double[] faces) {
         int n = faces.length - 1;
-        FluxStepResponse step = new FluxStepResponse(flow, prandtl, faces[n] / faces[0] * 1.001);
         double[][] response = new double[n][n];
         for (int i = 0; i < n; i++) {
             double x = 0.5 * (faces[i] + faces[i + 1]);

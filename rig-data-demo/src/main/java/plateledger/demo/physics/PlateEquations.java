@@ -31,19 +31,18 @@ final class PlateEquations {
     /**
      * The equations.
      *
-     * @param panel the panel
-     * @param grid its cells
+     * @param mesh the panel in cells
      * @param convection at the face
      * @param exchangeFactor F of F ε σ (T_s⁴ − T_w⁴)
      * @param referenceK temperature from which the unknowns are counted, near the surroundings, K
      */
-    PlateEquations(Panel panel, PlateGrid grid, Convection convection, double exchangeFactor, double referenceK) {
-        this.panel = panel;
-        this.grid = grid;
+    PlateEquations(MeshedPanel mesh, Convection convection, double exchangeFactor, double referenceK) {
+        panel = mesh.panel();
+        grid = mesh.grid();
         reference = referenceK;
         along = grid.along();
         across = grid.across();
-        modes = new SpanModes(grid, panel.sheetWPerK(), panel.edgeWPerMK());
+        modes = mesh.modes();
         covered = convection instanceof Convection.Cover;
         exchange = covered ? 0.0 : panel.emissivity() * exchangeFactor * STEFAN_BOLTZMANN;
         double typical = referenceK + 10.0;
@@ -156,8 +155,7 @@ final class PlateEquations {
                 faceK[j][i] = surface;
                 double next = covered
                         ? 0.0
-                        : exchange * (fourth(surface) - wall4)
-                                - radiationCoefficient * (surface - around.adiabaticK());
+                        : exchange * (fourth(surface) - wall4) - radiationCoefficient * (surface - around.adiabaticK());
                 change = Math.max(change, Math.abs(next - correction[j][i]));
                 correction[j][i] = next;
             }
@@ -167,12 +165,7 @@ final class PlateEquations {
 
     /** The state that belongs to converged fields. {@code stored} is what storage takes per area, W/m². */
     PlateState state(
-            double[] stripW,
-            Surround around,
-            double[][] sheet,
-            double[][] flux,
-            double[][] faceK,
-            double[][] stored) {
+            double[] stripW, Surround around, double[][] sheet, double[][] flux, double[][] faceK, double[][] stored) {
         double wall4 = fourth(around.wallK());
         double[][] sheetK = cells();
         double[][] radiation = cells();
@@ -198,8 +191,7 @@ final class PlateEquations {
             tailHeat += 2.0 * w * tail * (sheetK[j][along - 1] - around.tailK());
         }
         for (int i = 0; i < along; i++) {
-            edgeHeat +=
-                    2.0 * grid.length(i) * modes.edgeConductance() * (sheetK[across - 1][i] - around.frameK());
+            edgeHeat += 2.0 * grid.length(i) * modes.edgeConductance() * (sheetK[across - 1][i] - around.frameK());
         }
         double electrical = 0.0;
         for (double watts : stripW) {

@@ -18,8 +18,7 @@ public final class PlateMarch {
     /**
      * The plate at rest at one temperature, the foam between it and the plenum.
      *
-     * @param panel the panel
-     * @param grid its cells
+     * @param mesh the panel in cells
      * @param convection at the face
      * @param exchangeFactor F of radiation
      * @param startK temperature of the sheet at the start, K
@@ -27,14 +26,14 @@ public final class PlateMarch {
      * @param stepS length of a step, s
      */
     public PlateMarch(
-            Panel panel,
-            PlateGrid grid,
+            MeshedPanel mesh,
             Convection convection,
             double exchangeFactor,
             double startK,
             double plenumK,
             double stepS) {
-        equations = new PlateEquations(panel, grid, convection, exchangeFactor, startK);
+        Panel panel = mesh.panel();
+        equations = new PlateEquations(mesh, convection, exchangeFactor, startK);
         foam = new FoamLadder(panel.backWPerM2K(), panel.foamJPerM2K(), LAYERS, stepS, FoamLadder.FarSide.HELD);
         capacityRate = panel.capacityJPerM3K() * panel.thicknessM() / stepS;
         systems = equations.factorise(capacityRate + foam.stepConductance());

@@ -23,9 +23,7 @@ final class SpanModes {
         for (int j = 0; j < n; j++) {
             root[j] = Math.sqrt(grid.width(j));
         }
-        edge = edgeConductance == 0.0
-                ? 0.0
-                : 1.0 / (1.0 / edgeConductance + 0.5 * grid.width(n - 1) / sheet);
+        edge = edgeConductance == 0.0 ? 0.0 : 1.0 / (1.0 / edgeConductance + 0.5 * grid.width(n - 1) / sheet);
         double[][] k = new double[n][n];
         for (int j = 0; j < n - 1; j++) {
             double g = sheet / (grid.z(j + 1) - grid.z(j));

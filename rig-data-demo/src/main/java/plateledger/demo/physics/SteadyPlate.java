@@ -11,16 +11,14 @@ public final class SteadyPlate {
     /**
      * The plate.
      *
-     * @param panel the panel
-     * @param grid its cells
+     * @param mesh the panel in cells
      * @param convection at the face
      * @param exchangeFactor F of radiation
      * @param referenceK near the surroundings' temperature, K
      */
-    public SteadyPlate(
-            Panel panel, PlateGrid grid, Convection convection, double exchangeFactor, double referenceK) {
-        equations = new PlateEquations(panel, grid, convection, exchangeFactor, referenceK);
-        systems = equations.factorise(panel.backWPerM2K());
+    public SteadyPlate(MeshedPanel mesh, Convection convection, double exchangeFactor, double referenceK) {
+        equations = new PlateEquations(mesh, convection, exchangeFactor, referenceK);
+        systems = equations.factorise(mesh.panel().backWPerM2K());
     }
 
     /**

@@ -10,5 +10,4 @@ package plateledger.demo.physics;
  * @param noseK nose piece
  * @param tailK tail piece
  */
-public record Surround(
-        double adiabaticK, double wallK, double plenumK, double frameK, double noseK, double tailK) {}
+public record Surround(double adiabaticK, double wallK, double plenumK, double frameK, double noseK, double tailK) {}

@@ -15,8 +15,12 @@ public final class TurbulentLayer {
     /** C of this rig: 1.04 × 0.0287, dimensionless. */
     public static final double COEFFICIENT = 1.04 * 0.0287;
 
-    private static final double[] NODE = {-0.9061798459386640, -0.5384693101056831, 0.0, 0.5384693101056831, 0.9061798459386640};
-    private static final double[] WEIGHT = {0.2369268850561891, 0.4786286704993665, 0.5688888888888889, 0.4786286704993665, 0.2369268850561891};
+    private static final double[] NODE = {
+        -0.9061798459386640, -0.5384693101056831, 0.0, 0.5384693101056831, 0.9061798459386640
+    };
+    private static final double[] WEIGHT = {
+        0.2369268850561891, 0.4786286704993665, 0.5688888888888889, 0.4786286704993665, 0.2369268850561891
+    };
 
     private static final double LAMINAR_MOMENTUM = 2.0 * new BlasiusFlow().wallShear();
 

@@ -13,12 +13,14 @@ public final class ChannelErrors {
 
     /** Where a run stands between the day's zeros. */
     public enum Moment {
-        /** The zero before the day's runs. */
-        ZERO_BEFORE,
+        /** The fan-off zero before the day's runs. */
+        FAN_OFF_BEFORE,
+        /** The zero run with flow and without power, from which the temperature channels' drift counts. */
+        ZERO_RUN,
         /** Any run between. */
         RUN,
-        /** The zero after the day's runs. */
-        ZERO_AFTER
+        /** The fan-off zero after the day's runs. */
+        FAN_OFF_AFTER
     }
 
     private final Draws draws;
@@ -48,16 +50,19 @@ public final class ChannelErrors {
      *
      * @param channel channel
      * @param day test day
-     * @param moment where the run stands between the zeros; the drift of a run counts from the mean of the two zeros
+     * @param moment where the run stands between the zeros; a temperature channel's drift counts from
+     *     the zero run, any other's from the mean of the two fan-off zeros
      * @param truth true value, SI
      */
     public double reading(String channel, String day, Moment moment, double truth) {
         Fixed fixed = fixed(channel);
         Declared drift = fixed.instrument().dailyDrift();
+        boolean thermal = fixed.instrument().kind().equals("temperature");
         double moved = switch (moment) {
-            case ZERO_BEFORE -> -drift.draw(draws, channel + "/" + day + "/between zeros");
+            case FAN_OFF_BEFORE -> thermal ? 0.0 : -drift.draw(draws, channel + "/" + day + "/between zeros");
+            case FAN_OFF_AFTER -> thermal ? 0.0 : drift.draw(draws, channel + "/" + day + "/between zeros");
+            case ZERO_RUN -> thermal ? 0.0 : drift.draw(draws, channel + "/" + day + "/drift");
             case RUN -> drift.draw(draws, channel + "/" + day + "/drift");
-            case ZERO_AFTER -> drift.draw(draws, channel + "/" + day + "/between zeros");
         };
         double origin = fixed.instrument().gainOriginSi();
         return origin + (truth - origin + fixed.offset() + moved) / (1.0 - fixed.gain());

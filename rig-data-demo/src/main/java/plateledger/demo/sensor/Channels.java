@@ -9,7 +9,8 @@ public final class Channels {
     /** Junctions on the sheet. */
     public static final List<String> JUNCTIONS = numbered("T%02d", 20);
     /** Plate logger without the cover. */
-    public static final List<String> PLATE = joined(JUNCTIONS, List.of("TN1", "TT1", "TW1", "TW2", "TP1", "TF1", "TF2"));
+    public static final List<String> PLATE =
+            joined(JUNCTIONS, List.of("TN1", "TT1", "TW1", "TW2", "TP1", "TF1", "TF2"));
     /** The cover's thermocouples: two on the plate side, two on the room side. */
     public static final List<String> COVER = List.of("TC1", "TC2", "TC3", "TC4");
     /** Plate logger in a loss run. */
