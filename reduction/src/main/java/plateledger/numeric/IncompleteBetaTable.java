@@ -15,7 +15,7 @@ import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactor
  */
 public final class IncompleteBetaTable {
     private static final int MAX_TERMS = 3;
-    private static final int OCTAVES = 30;
+    private static final int OCTAVES = 20;
     private static final int PIECE_BITS = 6;
     private static final int PIECES = 1 << PIECE_BITS;
     private static final int SHIFT = 52 - PIECE_BITS;
@@ -23,13 +23,13 @@ public final class IncompleteBetaTable {
     private static final long FRACTION_MASK = (1L << SHIFT) - 1;
     private static final double FRACTION_SCALE = 1.0 / (1L << SHIFT);
     private static final double SMALLEST = Math.scalb(1.0, -1 - OCTAVES);
-    private static final int GAUSS_POINTS = 8;
+    private static final int GAUSS_POINTS = 4;
 
     private final double a;
     private final double b;
     private final int terms;
-    private final double[] head; // cubics of Φ_j(s) over s in [2^-31, 1/2)
-    private final double[] tail; // cubics of Φ_j(1) − Φ_j(s) over w = 1 − s in [2^-31, 1/2]
+    private final double[] head; // cubics of Φ_j(s) over s in [2^-21, 1/2)
+    private final double[] tail; // cubics of Φ_j(1) − Φ_j(s) over w = 1 − s in [2^-21, 1/2]
     private final double[] full = new double[MAX_TERMS];
 
     private IncompleteBetaTable(double a, double b, int terms) {
@@ -41,7 +41,8 @@ public final class IncompleteBetaTable {
         tail = new double[OCTAVES * PIECES * terms * 4];
         for (int j = 0; j < terms; j++) {
             int term = j;
-            double headAtHalf = fill(gauss, head, j, SMALLEST, s -> Math.pow(oneMinusPower(s, a), b - 1.0 + term));
+            double headAtHalf =
+                    fill(gauss, head, j, nearZero(SMALLEST, j), s -> Math.pow(oneMinusPower(s, a), b - 1.0 + term));
             double tailAtHalf =
                     fill(gauss, tail, j, nearOne(SMALLEST, j), w -> Math.pow(fromOne(w, a), b - 1.0 + term));
             full[j] = headAtHalf + tailAtHalf;
@@ -86,7 +87,7 @@ public final class IncompleteBetaTable {
             return g0 * full[0] + g1 * full[1] + g2 * full[2];
         }
         if (s < 0.5) {
-            return s < SMALLEST ? s * headWeight(g0, g1, g2) : cubics(head, s, g0, g1, g2);
+            return s < SMALLEST ? nearZeroSum(s, g0, g1, g2) : cubics(head, s, g0, g1, g2);
         }
         double whole = g0 * full[0] + g1 * full[1] + g2 * full[2];
         if (w < SMALLEST) {
@@ -104,8 +105,20 @@ public final class IncompleteBetaTable {
         return sum(s, 1.0 - s, j == 0 ? 1.0 : 0.0, j == 1 ? 1.0 : 0.0, j == 2 ? 1.0 : 0.0);
     }
 
-    private double headWeight(double g0, double g1, double g2) {
-        return terms == 1 ? g0 : terms == 2 ? g0 + g1 : g0 + g1 + g2;
+    private double nearZeroSum(double s, double g0, double g1, double g2) {
+        double sum = g0 * nearZero(s, 0);
+        if (terms > 1) {
+            sum += g1 * nearZero(s, 1);
+        }
+        if (terms > 2) {
+            sum += g2 * nearZero(s, 2);
+        }
+        return sum;
+    }
+
+    /** Φ_j for small s: ∫_0^s (1 − q σ^a + …) dσ, q = b − 1 + j; relative error of the order of s^(2a). */
+    private double nearZero(double s, int j) {
+        return s * (1.0 - (b - 1.0 + j) * Math.pow(s, a) / (1.0 + a));
     }
 
     private double nearOneSum(double w, double g0, double g1, double g2) {
@@ -119,9 +132,10 @@ public final class IncompleteBetaTable {
         return sum;
     }
 
-    /** Leading term of the tail for small w; relative error of the order of w. */
+    /** The tail for small w: ∫_0^w u^q dw with u = a w [1 + (1 − a) w/2 + …]; relative error of the order of w². */
     private double nearOne(double w, int j) {
-        return w * Math.pow(a * w, b - 1.0 + j) / (b + j);
+        double q = b - 1.0 + j;
+        return w * Math.pow(a * w, q) * (1.0 / (q + 1.0) + q * (1.0 - a) * w / (2.0 * (q + 2.0)));
     }
 
     private double cubics(double[] table, double v, double g0, double g1, double g2) {
@@ -142,23 +156,24 @@ public final class IncompleteBetaTable {
         double at(double v);
     }
 
-    /** Fills the cubics of term j from {@code start} at 2^-31 upwards; returns the value at 1/2. */
+    /** Fills the cubics of term j from {@code start} at 2^-21 upwards; returns the value at 1/2. */
     private double fill(GaussIntegrator gauss, double[] table, int j, double start, Slope slope) {
         double value = start;
+        double slopeLeft = slope.at(SMALLEST);
         for (int octave = 0; octave < OCTAVES; octave++) {
             double left = Math.scalb(1.0, octave - OCTAVES - 1);
             double width = left / PIECES;
             for (int piece = 0; piece < PIECES; piece++) {
                 double from = left + piece * width;
                 double rise = width * gauss.integrate(t -> slope.at(from + t * width));
-                double slope0 = width * slope.at(from);
-                double slope1 = width * slope.at(from + width);
+                double slopeRight = slope.at(from + width);
                 int k = ((octave * PIECES + piece) * terms + j) * 4;
                 table[k] = value;
-                table[k + 1] = slope0;
-                table[k + 2] = 3.0 * rise - 2.0 * slope0 - slope1;
-                table[k + 3] = slope0 + slope1 - 2.0 * rise;
+                table[k + 1] = width * slopeLeft;
+                table[k + 2] = 3.0 * rise - width * (2.0 * slopeLeft + slopeRight);
+                table[k + 3] = width * (slopeLeft + slopeRight) - 2.0 * rise;
                 value += rise;
+                slopeLeft = slopeRight;
             }
         }
         return value;

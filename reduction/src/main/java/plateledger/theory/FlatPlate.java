@@ -150,8 +150,8 @@ public final class FlatPlate {
         return law.recoveryFactor(prandtl) * speed * speed / (2.0 * heatCapacity);
     }
 
-    /** The exact laminar recovery factor, for comparison with Pr^½; 0.5 ≤ Pr ≤ 100. */
+    /** The exact laminar recovery factor, for comparison with Pr^½; 0.05 ≤ Pr ≤ 1000, NaN outside. */
     public static double exactLaminarRecovery(double prandtl) {
-        return LaminarTable.recovery(prandtl);
+        return SimilaritySolution.recovery(prandtl);
     }
 }

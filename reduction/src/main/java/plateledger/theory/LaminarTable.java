@@ -33,7 +33,6 @@ final class LaminarTable {
     private static final double[] UNIFORM_TEMPERATURE = new double[NODES];
     private static final double[] UNIFORM_FLUX = new double[NODES];
     private static final double[] RAMP = new double[NODES];
-    private static final double[] RECOVERY = new double[NODES];
     private static final double[][] FLUX_KERNEL = new double[3][NODES];
     private static final double[][] TEMPERATURE_KERNEL = new double[3][NODES];
 
@@ -47,7 +46,6 @@ final class LaminarTable {
             UNIFORM_TEMPERATURE[i] = atZero;
             UNIFORM_FLUX[i] = atHalf;
             RAMP[i] = atOne;
-            RECOVERY[i] = SimilaritySolution.recovery(prandtl) / Math.sqrt(prandtl);
             put(FLUX_KERNEL, i, fluxKernel(atHalf, atOne));
             put(TEMPERATURE_KERNEL, i, temperatureKernel(atZero, atHalf));
         }
@@ -68,11 +66,6 @@ final class LaminarTable {
     /** c(1, Pr): Nu_x/√Re_x for a wall difference ∝ x. */
     static double ramp(double prandtl) {
         return Math.cbrt(prandtl) * at(RAMP, prandtl);
-    }
-
-    /** Exact laminar recovery factor. */
-    static double recovery(double prandtl) {
-        return Math.sqrt(prandtl) * at(RECOVERY, prandtl);
     }
 
     /** Coefficient of u^(j − ⅔) in the flux kernel g, j = 0, 1, 2. */

@@ -23,7 +23,7 @@ public final class SimilaritySolution {
     /** Velocity layer's outer edge; f''² beyond it is below 1e-14. */
     private static final double VELOCITY_EDGE = 9.0;
 
-    private static final double STEP = 0.02;
+    private static final double STEP = 0.04;
 
     private SimilaritySolution() {}
 
