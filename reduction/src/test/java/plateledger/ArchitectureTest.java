@@ -51,6 +51,7 @@ final class ArchitectureTest {
                     Set.of("keyfile", "log", "rig", "fluid", "uncertainty", "expression", "quantity", "finding")),
             entry("theory", Set.of("expression", "fluid", "numeric", "quantity", "finding")),
             entry("sensor", Set.of("log", "rig", "fluid", "uncertainty", "numeric", "quantity", "finding")),
+            entry("ledger", Set.of("rig", "fluid", "theory", "uncertainty", "numeric", "quantity", "finding")),
             entry("steady", Set.of("log", "sensor", "rig", "uncertainty", "numeric", "quantity", "finding")),
             entry("fit", Set.of("expression", "uncertainty", "numeric", "quantity", "finding")),
             entry(
