@@ -49,6 +49,8 @@ public final class CommandLineProgram {
     /** The commands with their options; for help and completion too. */
     static CommandLine commandLine(Terminal terminal) {
         CommandLine line = new CommandLine(new RootCommand());
+        line.addSubcommand(new NewCommand(terminal));
+        line.addSubcommand(new PropertiesCommand(terminal));
         line.addSubcommand("completion", new AutoComplete.GenerateCompletion());
         line.setOut(terminal.out());
         line.setErr(terminal.err());

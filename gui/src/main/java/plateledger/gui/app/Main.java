@@ -1,5 +1,7 @@
 package plateledger.gui.app;
 
+import java.awt.AWTError;
+import java.awt.GraphicsEnvironment;
 import plateledger.cli.CommandLineProgram;
 
 /** Start of the program: with arguments the command line, without any the desktop window. */
@@ -17,6 +19,19 @@ public final class Main {
             System.setProperty("java.awt.headless", "true");
             System.exit(CommandLineProgram.run(args));
         }
+        if (!hasDisplay()) {
+            System.exit(CommandLineProgram.run());
+        }
         System.exit(CommandLineProgram.run());
+    }
+
+    /** True if a window can be opened; a display that is named but does not answer counts as none. */
+    private static boolean hasDisplay() {
+        try {
+            return !GraphicsEnvironment.isHeadless()
+                    && GraphicsEnvironment.getLocalGraphicsEnvironment().getScreenDevices().length > 0;
+        } catch (AWTError | java.awt.HeadlessException | NoClassDefFoundError e) {
+            return false; // no display answers, or the platform came without its windowing part
+        }
     }
 }

@@ -1,0 +1,5 @@
+/** Tests. */
+@NullMarked
+package plateledger.gui.app;
+
+import org.jspecify.annotations.NullMarked;
