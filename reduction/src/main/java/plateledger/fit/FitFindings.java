@@ -39,12 +39,13 @@ final class FitFindings {
     }
 
     private void lack(LackOfFit lack, double[] x) {
-        if (lack.fProbability() < SIGNIFICANT) {
+        if (lack.fProbabilityShared() < SIGNIFICANT) {
             caution(
                     "FIT-LACK",
                     text(
-                            "F(%d, %d) = %.3g of lack of fit against repeats, probability %.2g",
-                            lack.fDof()[0], lack.fDof()[1], lack.f(), lack.fProbability()),
+                            "F(%d, %d) = %.3g of lack of fit against repeats, probability %.2g with what shared sources"
+                                    + " add allowed for",
+                            lack.fDof()[0], lack.fDof()[1], lack.f(), lack.fProbabilityShared()),
                     "a probability of at least 0.05",
                     "The power law does not describe the points within the scatter of repeats: look at the residuals, fit"
                             + " a narrower range, or another form.");

@@ -4,7 +4,7 @@ import java.util.List;
 import plateledger.finding.Finding;
 
 /**
- * A finished fit.
+ * A finished fit. Its covariances are absolute: from the stated uncertainties, never scaled by the residuals.
  *
  * @param problem what was fitted
  * @param twoStep the default: both-axes fit weighted with the random parts, shared sources added by perturbation
@@ -12,7 +12,8 @@ import plateledger.finding.Finding;
  * @param generalised generalised least squares with the full covariance, for comparison
  * @param chiSquare weighted sum of squares of the two-step fit (random parts only)
  * @param dof its degrees of freedom
- * @param chiSquareProbability probability of a larger value
+ * @param chiSquareProbability probability of a larger value, random parts only; findings allow for the part that shared
+ *     sources add when they do not act alike on all points
  * @param lackOfFitF F of lack of fit against repeats; NaN without repeats
  * @param lackOfFitProbability its probability; NaN without repeats
  * @param repeatScatter relative standard deviation within repeats of ln Y; NaN without repeats

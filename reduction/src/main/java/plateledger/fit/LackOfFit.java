@@ -14,7 +14,8 @@ import org.apache.commons.math3.special.Gamma;
  * @param probability of a larger χ² if shared sources acted alike on all points
  * @param probabilityShared of a larger χ² when what the stated shared sources add to it is allowed for
  * @param f F of lack of fit against the scatter of repeats; NaN without repeats
- * @param fProbability its probability; NaN without repeats
+ * @param fProbability its probability if shared sources acted alike on all points; NaN without repeats
+ * @param fProbabilityShared its probability when what the stated shared sources add is allowed for; NaN without repeats
  * @param fDof degrees of freedom of lack of fit and of repeats
  * @param repeatScatter standard deviation of ln(Nu/Pr^n) within repeats, slope removed; NaN without repeats
  * @param bend coefficient of (ln Re − x_g)² left in the residuals; NaN below four points
@@ -27,46 +28,64 @@ record LackOfFit(
         double probabilityShared,
         double f,
         double fProbability,
+        double fProbabilityShared,
         int[] fDof,
         double repeatScatter,
         double bend,
         double uBend) {
+
+    /**
+     * A sum of squares rᵀ Q r under the stated covariance V of r: c χ²_ν with the same mean tr(QV) and variance
+     * 2 tr(QVQV). Satterthwaite, Biometrics 2 (1946) 110.
+     */
+    private record Quadratic(double mean, double dof) {
+        static Quadratic of(double[][] qv) {
+            double mean = 0.0;
+            double square = 0.0;
+            for (int i = 0; i < qv.length; i++) {
+                mean += qv[i][i];
+                for (int j = 0; j < qv.length; j++) {
+                    square += qv[i][j] * qv[j][i];
+                }
+            }
+            return new Quadratic(mean, mean * mean / square);
+        }
+
+        double probabilityAbove(double value) {
+            return Gamma.regularizedGammaQ(0.5 * dof, 0.5 * dof * value / mean);
+        }
+    }
+
+    /** Scatter within sets of repeats: classic F with its probability, that with shared sources, plain scatter. */
+    private record Repeats(
+            double f, double probability, double probabilityShared, int lack, int within, double scatter) {}
 
     /** Tests the residuals of a line. */
     static LackOfFit of(List<FitPoint> points, double[] x, double[] residuals, BothAxesLine line, double[][] v) {
         int n = x.length;
         double[][] p = projector(line);
         double[][] pv = product(p, v);
-        double mean = 0.0;
-        double square = 0.0;
-        for (int i = 0; i < n; i++) {
-            mean += pv[i][i];
-            for (int j = 0; j < n; j++) {
-                square += pv[i][j] * pv[j][i];
-            }
-        }
-        // S is a weighted sum of χ²₁; mean and variance 2 tr(PVPV) are met by c χ²_ν (Satterthwaite, Biometrics 2
-        // (1946) 110)
-        double scale = square / mean;
-        double shared = Gamma.regularizedGammaQ(0.5 * mean * mean / square, 0.5 * line.chiSquare() / scale);
-        double[] repeats = repeats(points, residuals, line);
+        Repeats repeats = repeats(points, residuals, line, pv, v);
         double[] bend = n < 4 ? new double[] {Double.NaN, Double.NaN} : bend(x, residuals, line.centre(), p, pv);
         return new LackOfFit(
                 line.chiSquare(),
                 n - 2,
                 Gamma.regularizedGammaQ(0.5 * (n - 2), 0.5 * line.chiSquare()),
-                shared,
-                repeats[0],
-                repeats[1],
-                new int[] {(int) repeats[2], (int) repeats[3]},
-                repeats[4],
+                Quadratic.of(pv).probabilityAbove(line.chiSquare()),
+                repeats.f(),
+                repeats.probability(),
+                repeats.probabilityShared(),
+                new int[] {repeats.lack(), repeats.within()},
+                repeats.scatter(),
                 bend[0],
                 bend[1]);
     }
 
-    private static double[] repeats(List<FitPoint> points, double[] residuals, BothAxesLine line) {
+    private static Repeats repeats(
+            List<FitPoint> points, double[] residuals, BothAxesLine line, double[][] pv, double[][] v) {
+        int n = residuals.length;
         Map<String, double[]> sets = new LinkedHashMap<>(); // Σw, Σwr, number, Σr
-        for (int i = 0; i < residuals.length; i++) {
+        for (int i = 0; i < n; i++) {
             double[] sums = sets.computeIfAbsent(setOf(points.get(i), i), key -> new double[4]);
             sums[0] += line.weights()[i];
             sums[1] += line.weights()[i] * residuals[i];
@@ -75,23 +94,50 @@ record LackOfFit(
         }
         double pure = 0.0;
         double plain = 0.0;
-        for (int i = 0; i < residuals.length; i++) {
-            double[] sums = sets.getOrDefault(setOf(points.get(i), i), new double[4]);
+        double[][] q = new double[n][n]; // pure error as a quadratic form
+        for (int i = 0; i < n; i++) {
+            String set = setOf(points.get(i), i);
+            double[] sums = sets.getOrDefault(set, new double[4]);
             double weighted = residuals[i] - sums[1] / sums[0];
             double unweighted = residuals[i] - sums[3] / sums[2];
             pure += line.weights()[i] * weighted * weighted;
             plain += unweighted * unweighted;
+            for (int j = 0; j < n; j++) {
+                if (setOf(points.get(j), j).equals(set)) {
+                    q[i][j] = line.weights()[i] * ((i == j ? 1.0 : 0.0) - line.weights()[j] / sums[0]);
+                }
+            }
         }
         int lack = sets.size() - 2;
-        int within = residuals.length - sets.size();
+        int within = n - sets.size();
         double scatter = within > 0 ? Math.sqrt(plain / within) : Double.NaN;
         if (within < 1 || lack < 1 || !(pure > 0.0)) {
-            return new double[] {Double.NaN, Double.NaN, lack, within, scatter};
+            return new Repeats(Double.NaN, Double.NaN, Double.NaN, lack, within, scatter);
         }
-        double f = (line.chiSquare() - pure) / lack / (pure / within);
-        double probability =
-                Beta.regularizedBeta(within / (within + lack * Math.max(0.0, f)), 0.5 * within, 0.5 * lack);
-        return new double[] {f, probability, lack, within, scatter};
+        double lackSquares = Math.max(0.0, line.chiSquare() - pure);
+        double f = lackSquares / lack / (pure / within);
+        double[][] pureV = product(q, v);
+        double[][] lackV = new double[n][n];
+        for (int i = 0; i < n; i++) {
+            for (int j = 0; j < n; j++) {
+                lackV[i][j] = pv[i][j] - pureV[i][j];
+            }
+        }
+        Quadratic expectedLack = Quadratic.of(lackV);
+        Quadratic expectedPure = Quadratic.of(pureV);
+        double fShared = lackSquares / expectedLack.mean() / (pure / expectedPure.mean());
+        return new Repeats(
+                f,
+                fTail(f, lack, within),
+                fTail(fShared, expectedLack.dof(), expectedPure.dof()),
+                lack,
+                within,
+                scatter);
+    }
+
+    /** Probability that F with these degrees of freedom is larger. */
+    private static double fTail(double f, double numerator, double denominator) {
+        return Beta.regularizedBeta(denominator / (denominator + numerator * f), 0.5 * denominator, 0.5 * numerator);
     }
 
     /** Points without a set name are repeats of nothing. */

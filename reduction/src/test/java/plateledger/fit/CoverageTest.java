@@ -105,6 +105,46 @@ final class CoverageTest {
         assertTrue(seen > 70, "seen " + seen);
     }
 
+    /**
+     * Runs of even levels on one day, of odd levels on the other, with a stated day error of 2 %: χ² of the random parts
+     * and F against repeats (all within a day) are far too large, but no lack of fit may be reported for it.
+     */
+    @Test
+    void aStatedDayErrorIsNotTakenForLackOfFit() throws RefusedException {
+        ZigguratSampler.NormalizedGaussian gauss = gauss(20261204L);
+        int plain = 0;
+        int flagged = 0;
+        for (int c = 0; c < CAMPAIGNS; c++) {
+            FitProblem drawn = draw(gauss, 0.0);
+            List<SharedSource> sources = new ArrayList<>(drawn.sources());
+            List<FitPoint> points = new ArrayList<>();
+            double[][] day = new double[2][24];
+            double[] z = {gauss.sample(), gauss.sample()};
+            for (int i = 0; i < 24; i++) {
+                int d = (i / 3) % 2;
+                day[d][i] = 0.02;
+                FitPoint p = drawn.points().get(i);
+                points.add(new FitPoint(
+                        p.id(),
+                        p.set(),
+                        p.re(),
+                        p.nu() * Math.exp(0.02 * z[d]),
+                        p.pr(),
+                        p.uLnReRandom(),
+                        p.uLnYRandom(),
+                        0.0));
+            }
+            for (int d = 0; d < 2; d++) {
+                sources.add(new SharedSource("day" + d, "day:" + d, new double[24], day[d], Double.POSITIVE_INFINITY));
+            }
+            FitResult fit = PowerLawFit.fit(new FitProblem("days", 0.0, points, sources));
+            plain += fit.chiSquareProbability() < 0.05 && fit.lackOfFitProbability() < 0.05 ? 1 : 0;
+            flagged += fit.findings().stream().anyMatch(f -> f.id().equals("FIT-LACK")) ? 1 : 0;
+        }
+        assertTrue(plain > 0.6 * CAMPAIGNS, "random parts alone would have flagged " + plain);
+        assertTrue(flagged < 0.15 * CAMPAIGNS, "flagged " + flagged);
+    }
+
     /** Errors in ln Re as large as a fifth of its range: ordinary least squares flattens the slope, the both-axes fit does not. */
     @Test
     void largeErrorsInReDoNotFlattenTheSlope() {
