@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertNotEquals;
 
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.ValidationRecorder;
 
 final class BothAxesLineTest {
     /** Pearson's points (Phil. Mag. 2 (1901) 559) with York's weights (Can. J. Phys. 44 (1966) 1079). */
@@ -30,53 +31,68 @@ final class BothAxesLineTest {
     @Test
     @Tag("validation")
     void pearsonDataWithYorkWeights() {
-        BothAxesLine line = pearsonYork(0.0);
-        assertEquals(5.479910224033, line.a(), 5e-12);
-        assertEquals(-0.480533407446, line.b(), 5e-12);
-        assertEquals(0.294970735, Math.sqrt(line.varA()), 5e-10);
-        assertEquals(0.057985009, Math.sqrt(line.varB()), 5e-10);
-        assertEquals(-0.0164725447, line.covAB(), 5e-11);
-        assertEquals(1.48329414926, line.chiSquare() / 8.0, 5e-12);
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Fit",
+                "Pearson data with York weights",
+                "Williamson, Can. J. Phys. 46 (1968) 1845; u as York et al., Am. J. Phys. 72 (2004) 367")) {
+            BothAxesLine line = pearsonYork(0.0);
+            check.relative(5.479910224033, line.a(), 1e-12, "line.a()");
+            check.relative(-0.480533407446, line.b(), 2e-11, "line.b()");
+            check.relative(0.294970735, Math.sqrt(line.varA()), 2e-9, "sqrt(line.varA())");
+            check.relative(0.057985009, Math.sqrt(line.varB()), 9e-9, "sqrt(line.varB())");
+            check.relative(-0.0164725447, line.covAB(), 4e-9, "line.covAB()");
+            check.relative(1.48329414926, line.chiSquare() / 8.0, 4e-12, "line.chiSquare()/8.0");
+        }
     }
 
     /** The same points with a constant correlation; computed by two routes in SciPy 1.10, apart from this program. */
     @Test
     @Tag("validation")
     void pearsonDataWithCorrelatedErrors() {
-        BothAxesLine plus = pearsonYork(0.5);
-        assertEquals(5.534374564, plus.a(), 5e-9);
-        assertEquals(-0.492880617, plus.b(), 5e-9);
-        assertEquals(0.313418027, Math.sqrt(plus.varA()), 5e-9);
-        assertEquals(0.062973980, Math.sqrt(plus.varB()), 5e-9);
-        assertEquals(9.570265132, plus.chiSquare(), 5e-9);
-        BothAxesLine minus = pearsonYork(-0.5);
-        assertEquals(5.358788127, minus.a(), 5e-9);
-        assertEquals(-0.454006480, minus.b(), 5e-9);
-        assertEquals(0.268081370, Math.sqrt(minus.varA()), 5e-9);
-        assertEquals(0.050874253, Math.sqrt(minus.varB()), 5e-9);
-        assertEquals(16.533951625, minus.chiSquare(), 5e-9);
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(), "Fit", "Pearson data with correlated errors", "computed by two routes in SciPy")) {
+            BothAxesLine plus = pearsonYork(0.5);
+            check.relative(5.534374564, plus.a(), 1e-9, "plus.a()");
+            check.relative(-0.492880617, plus.b(), 2e-8, "plus.b()");
+            check.relative(0.313418027, Math.sqrt(plus.varA()), 2e-8, "sqrt(plus.varA())");
+            check.relative(0.062973980, Math.sqrt(plus.varB()), 8e-8, "sqrt(plus.varB())");
+            check.relative(9.570265132, plus.chiSquare(), 6e-10, "plus.chiSquare()");
+            BothAxesLine minus = pearsonYork(-0.5);
+            check.relative(5.358788127, minus.a(), 1e-9, "minus.a()");
+            check.relative(-0.454006480, minus.b(), 2e-8, "minus.b()");
+            check.relative(0.268081370, Math.sqrt(minus.varA()), 2e-8, "sqrt(minus.varA())");
+            check.relative(0.050874253, Math.sqrt(minus.varB()), 1e-7, "sqrt(minus.varB())");
+            check.relative(16.533951625, minus.chiSquare(), 4e-10, "minus.chiSquare()");
+        }
     }
 
     /** ISO/TS 28037:2010, example with uncertainties in both coordinates; printed 0.5788, 2.1597, 0.4764, 0.1355, −0.0577, 2.743. */
     @Test
     @Tag("validation")
     void straightLineOfIso28037() {
-        double[] x = {1.2, 1.9, 2.9, 4.0, 4.7, 5.9};
-        double[] y = {3.4, 4.4, 7.2, 8.5, 10.8, 13.5};
-        double[] varX = {0.04, 0.04, 0.04, 0.04, 0.04, 0.04};
-        double[] varY = {0.04, 0.04, 0.04, 0.16, 0.16, 0.16};
-        BothAxesLine line = BothAxesLine.fit(x, y, new RandomParts(varX, varY, new double[6]), 0.0)
-                .orElseThrow();
-        assertEquals(0.5788, line.a(), 5e-5);
-        assertEquals(2.1597, line.b(), 5e-5);
-        assertEquals(0.4764, Math.sqrt(line.varA()), 5e-5);
-        assertEquals(0.1355, Math.sqrt(line.varB()), 5e-5);
-        assertEquals(-0.0577, line.covAB(), 5e-5);
-        assertEquals(2.743, line.chiSquare(), 5e-4);
-        assertEquals(0.5788221221, line.a(), 1e-8); // computed in SciPy 1.10, as are those below
-        assertEquals(2.1596565674, line.b(), 1e-8);
-        assertEquals(0.4764206296, Math.sqrt(line.varA()), 1e-8);
-        assertEquals(0.1355479275, Math.sqrt(line.varB()), 1e-8);
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Fit",
+                "straight line with errors in both axes",
+                "ISO/TS 28037:2010, as printed; digits computed in SciPy")) {
+            double[] x = {1.2, 1.9, 2.9, 4.0, 4.7, 5.9};
+            double[] y = {3.4, 4.4, 7.2, 8.5, 10.8, 13.5};
+            double[] varX = {0.04, 0.04, 0.04, 0.04, 0.04, 0.04};
+            double[] varY = {0.04, 0.04, 0.04, 0.16, 0.16, 0.16};
+            BothAxesLine line = BothAxesLine.fit(x, y, new RandomParts(varX, varY, new double[6]), 0.0)
+                    .orElseThrow();
+            check.relative(0.5788, line.a(), 9e-5, "line.a()");
+            check.relative(2.1597, line.b(), 3e-5, "line.b()");
+            check.relative(0.4764, Math.sqrt(line.varA()), 2e-4, "sqrt(line.varA())");
+            check.relative(0.1355, Math.sqrt(line.varB()), 4e-4, "sqrt(line.varB())");
+            check.relative(-0.0577, line.covAB(), 9e-4, "line.covAB()");
+            check.relative(2.743, line.chiSquare(), 2e-4, "line.chiSquare()");
+            check.relative(0.5788221221, line.a(), 2e-8, "line.a()"); // computed in SciPy 1.10, as are those below
+            check.relative(2.1596565674, line.b(), 5e-9, "line.b()");
+            check.relative(0.4764206296, Math.sqrt(line.varA()), 3e-8, "sqrt(line.varA())");
+            check.relative(0.1355479275, Math.sqrt(line.varB()), 8e-8, "sqrt(line.varB())");
+        }
     }
 
     /**

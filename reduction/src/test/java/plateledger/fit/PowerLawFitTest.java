@@ -16,6 +16,7 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import plateledger.finding.Finding;
 import plateledger.finding.RefusedException;
+import plateledger.validation.ValidationRecorder;
 
 final class PowerLawFitTest {
     private static double correlation(Constants c) {
@@ -46,43 +47,58 @@ final class PowerLawFitTest {
     @Test
     @Tag("validation")
     void ordinaryLeastSquaresAsSpecialCase() {
-        FitResult fit = fit(uniform(Points.nufit()));
-        assertEquals(13.353766833333, fit.twoStep().xg(), 1e-11);
-        assertEquals(7.0579445833, fit.twoStep().a(), 1e-9);
-        assertEquals(0.8015859546, fit.twoStep().m(), 1e-9);
-        // the uncertainty put in is the residual standard deviation, so the usual standard errors come out
-        assertEquals(0.0022837544, Math.sqrt(fit.twoStep().varA()), 1e-9);
-        assertEquals(0.0030324587, fit.twoStep().uM(), 1e-9);
-        assertEquals(22.0, fit.chiSquare(), 1e-6);
-        ResidualTests tests = ResidualTests.of(fit);
-        assertEquals(2.0871167344, tests.largestStudentised(), 1e-7);
-        assertEquals("R4", fit.problem().points().get(tests.at()).id());
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Fit",
+                "campaign of 24 runs: ordinary least squares, studentised residual",
+                "computed in Python and R")) {
+            FitResult fit = fit(uniform(Points.nufit()));
+            check.relative(13.353766833333, fit.twoStep().xg(), 8e-13, "fit.twoStep().xg()");
+            check.relative(7.0579445833, fit.twoStep().a(), 2e-10, "fit.twoStep().a()");
+            check.relative(0.8015859546, fit.twoStep().m(), 2e-9, "fit.twoStep().m()");
+            // the uncertainty put in is the residual standard deviation, so the usual standard errors come out
+            check.relative(0.0022837544, Math.sqrt(fit.twoStep().varA()), 5e-7, "sqrt(fit.twoStep().varA())");
+            check.relative(0.0030324587, fit.twoStep().uM(), 4e-7, "fit.twoStep().uM()");
+            check.relative(22.0, fit.chiSquare(), 5e-8, "fit.chiSquare()");
+            ResidualTests tests = ResidualTests.of(fit);
+            check.relative(2.0871167344, tests.largestStudentised(), 5e-8, "tests.largestStudentised()");
+            assertEquals("R4", fit.problem().points().get(tests.at()).id());
+        }
     }
 
     /** The random parts alone; expected values computed in SciPy 1.10 by two routes. */
     @Test
     @Tag("validation")
     void bothAxesFitWithRandomParts() {
-        FitResult fit = fit(Points.nufit());
-        assertEquals(7.0579030662, fit.randomOnly().a(), 1e-9);
-        assertEquals(0.8022665366, fit.randomOnly().m(), 1e-9);
-        assertEquals(0.0018540119, Math.sqrt(fit.randomOnly().varA()), 1e-9);
-        assertEquals(0.0024576006, fit.randomOnly().uM(), 1e-9);
-        assertEquals(32.272551959, fit.chiSquare(), 1e-7);
-        assertEquals(22, fit.dof());
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Fit",
+                "campaign of 24 runs: both-axes fit, random parts",
+                "computed by two routes in SciPy")) {
+            FitResult fit = fit(Points.nufit());
+            check.relative(7.0579030662, fit.randomOnly().a(), 2e-10, "fit.randomOnly().a()");
+            check.relative(0.8022665366, fit.randomOnly().m(), 2e-9, "fit.randomOnly().m()");
+            check.relative(0.0018540119, Math.sqrt(fit.randomOnly().varA()), 6e-7, "sqrt(fit.randomOnly().varA())");
+            check.relative(0.0024576006, fit.randomOnly().uM(), 5e-7, "fit.randomOnly().uM()");
+            check.relative(32.272551959, fit.chiSquare(), 4e-9, "fit.chiSquare()");
+            assertEquals(22, fit.dof());
+        }
     }
 
     /** The default: random parts and the shifts of six shared sources. */
     @Test
     @Tag("validation")
     void twoStepFit() {
-        FitResult fit = fit(Points.nufit());
-        assertEquals(7.0579030662, fit.twoStep().a(), 1e-9);
-        assertEquals(0.8022665366, fit.twoStep().m(), 1e-9);
-        assertEquals(0.0140230924, Math.sqrt(fit.twoStep().varA()), 1e-8);
-        assertEquals(0.0025634769, fit.twoStep().uM(), 1e-9);
-        assertEquals(0.0637260759, correlation(fit.twoStep()), 1e-6);
-        assertEquals(1.959963984540054, fit.coverageFactor(), 1e-12);
+        try (ValidationRecorder check =
+                ValidationRecorder.of(getClass(), "Fit", "campaign of 24 runs: two-step fit", "computed in SciPy")) {
+            FitResult fit = fit(Points.nufit());
+            check.relative(7.0579030662, fit.twoStep().a(), 2e-10, "fit.twoStep().a()");
+            check.relative(0.8022665366, fit.twoStep().m(), 2e-9, "fit.twoStep().m()");
+            check.relative(0.0140230924, Math.sqrt(fit.twoStep().varA()), 8e-7, "sqrt(fit.twoStep().varA())");
+            check.relative(0.0025634769, fit.twoStep().uM(), 4e-7, "fit.twoStep().uM()");
+            check.relative(0.0637260759, correlation(fit.twoStep()), 2e-5, "correlation(fit.twoStep())");
+            check.relative(1.959963984540054, fit.coverageFactor(), 6e-13, "fit.coverageFactor()");
+        }
     }
 
     /** The two-step band at Re = 10⁶ against refits with drawn errors: u(a) 0.013945, u(m) 0.002572 from 20 000 draws (2 %). */
@@ -97,18 +113,24 @@ final class PowerLawFitTest {
     @Test
     @Tag("validation")
     void generalisedFit() {
-        FitResult fit = fit(Points.nufit());
-        Constants full = fit.generalised();
-        assertEquals(7.0576747957, full.a(), 1e-9);
-        assertEquals(0.8022256408, full.m(), 1e-9);
-        assertEquals(0.0140222324, Math.sqrt(full.varA()), 1e-9);
-        assertEquals(0.0025631419, full.uM(), 1e-9);
-        assertEquals(0.0635844474, correlation(full), 1e-7);
-        assertEquals(-3.6550593660, Math.log(full.c()), 1e-8);
-        assertEquals(0.0258599622, full.c(), 1e-9);
-        assertEquals(0.0361540751, full.uLnC(), 1e-8);
-        assertEquals(7.4280974515, full.lnY(1e6), 1e-9);
-        assertEquals(0.0141468775, full.uLnY(1e6), 1e-9);
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Fit",
+                "campaign of 24 runs: generalised least squares",
+                "computed by two routes in SciPy")) {
+            FitResult fit = fit(Points.nufit());
+            Constants full = fit.generalised();
+            check.relative(7.0576747957, full.a(), 2e-10, "full.a()");
+            check.relative(0.8022256408, full.m(), 2e-9, "full.m()");
+            check.relative(0.0140222324, Math.sqrt(full.varA()), 8e-8, "sqrt(full.varA())");
+            check.relative(0.0025631419, full.uM(), 4e-7, "full.uM()");
+            check.relative(0.0635844474, correlation(full), 2e-6, "correlation(full)");
+            check.relative(-3.6550593660, Math.log(full.c()), 3e-9, "log(full.c())");
+            check.relative(0.0258599622, full.c(), 4e-8, "full.c()");
+            check.relative(0.0361540751, full.uLnC(), 3e-7, "full.uLnC()");
+            check.relative(7.4280974515, full.lnY(1e6), 2e-10, "full.lnY(1e6)");
+            check.relative(0.0141468775, full.uLnY(1e6), 8e-8, "full.uLnY(1e6)");
+        }
     }
 
     /** The wrong way, every error as if independent: the line itself still agrees with the figures computed for it. */
@@ -146,15 +168,18 @@ final class PowerLawFitTest {
     @Test
     @Tag("validation")
     void lackOfFitAgainstReplicates() {
-        FitResult fit = fit(Points.replicates(0.012));
-        assertEquals(6.6429494167, fit.twoStep().a(), 1e-9);
-        assertEquals(0.8005676573, fit.twoStep().m(), 1e-9);
-        assertEquals(10.9659, fit.lackOfFitF(), 5e-5);
-        assertEquals(0.00011032, fit.lackOfFitProbability(), 5e-9);
-        assertEquals(Math.sqrt(0.002001174387 / 18.0), fit.repeatScatter(), 1e-9);
-        assertEquals(0.006877770423 / (0.012 * 0.012), fit.chiSquare(), 1e-6);
-        assertTrue(has(fit.findings(), "FIT-LACK"));
-        assertTrue(has(fit.findings(), "FIT-BEND"));
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(), "Fit", "lack of fit against replicates", "computed in Python and R")) {
+            FitResult fit = fit(Points.replicates(0.012));
+            check.relative(6.6429494167, fit.twoStep().a(), 2e-10, "fit.twoStep().a()");
+            check.relative(0.8005676573, fit.twoStep().m(), 2e-9, "fit.twoStep().m()");
+            check.relative(10.9659, fit.lackOfFitF(), 5e-6, "fit.lackOfFitF()");
+            check.relative(0.00011032, fit.lackOfFitProbability(), 5e-5, "fit.lackOfFitProbability()");
+            check.relative(Math.sqrt(0.002001174387 / 18.0), fit.repeatScatter(), 1e-7, "fit.repeatScatter()");
+            check.relative(0.006877770423 / (0.012 * 0.012), fit.chiSquare(), 3e-8, "fit.chiSquare()");
+            assertTrue(has(fit.findings(), "FIT-LACK"));
+            assertTrue(has(fit.findings(), "FIT-BEND"));
+        }
     }
 
     @Test
@@ -271,10 +296,13 @@ final class PowerLawFitTest {
     @Test
     @Tag("validation")
     void runsTest() {
-        ResidualTests.Runs runs = ResidualTests.of(fit(Points.nufit())).alongPoints();
-        assertEquals(15, runs.runs());
-        assertEquals(12.9166667, runs.expected(), 1e-6);
-        assertEquals(0.8759922, runs.z(), 1e-6);
+        try (ValidationRecorder check =
+                ValidationRecorder.of(getClass(), "Fit", "runs of residuals", "computed in Python")) {
+            ResidualTests.Runs runs = ResidualTests.of(fit(Points.nufit())).alongPoints();
+            assertEquals(15, runs.runs());
+            check.relative(12.9166667, runs.expected(), 8e-8, "runs.expected()");
+            check.relative(0.8759922, runs.z(), 2e-6, "runs.z()");
+        }
     }
 
     /** A bent truth leaves three runs along Re: by hand, + − + in order of Re though the points come mixed. */

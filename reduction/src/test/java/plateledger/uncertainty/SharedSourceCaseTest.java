@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.ValidationRecorder;
 
 /**
  * Random and systematic parts with a shared reference and a shared tape, in the form of ASME PTC 19.1. A worked case of
@@ -56,25 +57,31 @@ final class SharedSourceCaseTest {
 
     @Test
     void sharedSourcesCancelWhereTheyShould() {
-        double[][] systematic = {
-            source(0, 0.04),
-            source(1, 0.006),
-            source(2, 0.60),
-            source(4, 0.10),
-            source(5, 0.10),
-            source(4, 0.20, 5, 0.20), // common reference of both temperatures
-            source(3, 0.06 * 0.002, 6, 0.30 * 0.002), // one tape for length and area
-            source(3, 0.06 * 0.0015),
-            source(7, 0.000268)
-        };
-        double[][] random = {source(0, 0.01), source(1, 0.002), source(2, 0.10), source(4, 0.03), source(5, 0.05)};
-        assertEquals(531.7164179, nusselt(BEST), 1e-7 * 531.7);
-        double b = u(systematic);
-        double s = u(random);
-        assertEquals(6.468412715, b, 1e-7 * b);
-        assertEquals(0.9885034175, s, 1e-7 * s);
-        assertEquals(6.543508391, Math.hypot(b, s), 1e-7 * b);
-        assertEquals(13.08701678, 2.0 * Math.hypot(b, s), 2e-7 * b);
+        try (ValidationRecorder check = ValidationRecorder.of(
+                getClass(),
+                "Uncertainty",
+                "shared reference and shared tape",
+                "form of ASME PTC 19.1; own case, computed in Python")) {
+            double[][] systematic = {
+                source(0, 0.04),
+                source(1, 0.006),
+                source(2, 0.60),
+                source(4, 0.10),
+                source(5, 0.10),
+                source(4, 0.20, 5, 0.20), // common reference of both temperatures
+                source(3, 0.06 * 0.002, 6, 0.30 * 0.002), // one tape for length and area
+                source(3, 0.06 * 0.0015),
+                source(7, 0.000268)
+            };
+            double[][] random = {source(0, 0.01), source(1, 0.002), source(2, 0.10), source(4, 0.03), source(5, 0.05)};
+            check.relative(531.7164179, nusselt(BEST), 1e-7, "nusselt(BEST)");
+            double b = u(systematic);
+            double s = u(random);
+            assertEquals(6.468412715, b, 1e-7 * b);
+            assertEquals(0.9885034175, s, 1e-7 * s);
+            assertEquals(6.543508391, Math.hypot(b, s), 1e-7 * b);
+            assertEquals(13.08701678, 2.0 * Math.hypot(b, s), 2e-7 * b);
+        }
     }
 
     @Test
