@@ -77,10 +77,10 @@ final class SharedSourceCaseTest {
             check.relative(531.7164179, nusselt(BEST), 1e-7, "nusselt(BEST)");
             double b = u(systematic);
             double s = u(random);
-            assertEquals(6.468412715, b, 1e-7 * b);
-            assertEquals(0.9885034175, s, 1e-7 * s);
-            assertEquals(6.543508391, Math.hypot(b, s), 1e-7 * b);
-            assertEquals(13.08701678, 2.0 * Math.hypot(b, s), 2e-7 * b);
+            check.relative(6.468412715, b, 1e-7, "systematic");
+            check.relative(0.9885034175, s, 1e-7, "random");
+            check.relative(6.543508391, Math.hypot(b, s), 1e-7, "combined");
+            check.relative(13.08701678, 2.0 * Math.hypot(b, s), 1e-7, "expanded");
         }
     }
 
