@@ -219,7 +219,9 @@ public final class Form<T> {
     /** One of several values, by its word; the first is the placeholder. */
     public static <T> Form<T> choice(Map<String, T> byWord) {
         Map<String, T> words = new LinkedHashMap<>(byWord);
-        String list = String.join(", ", words.keySet());
+        String list = words.keySet().stream()
+                .map(word -> "\"" + word.replace("\t", "\\t") + "\"")
+                .collect(Collectors.joining(" "));
         String want = "one of: " + list;
         T first = words.values().iterator().next();
         return new Form<>("choice", list, want, first, node -> {
