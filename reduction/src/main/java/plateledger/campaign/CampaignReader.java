@@ -33,6 +33,9 @@ public final class CampaignReader {
     private static final List<String> TEXT_KEYS = List.of(
             "laboratory", "customer", "object", "report_number", "author", "reviewer", "purpose", "issued", "tested");
 
+    private static final double THIRD = 1.0 / 3.0;
+    private static final Campaign.SteadyLimits USUAL_LIMITS = new Campaign.SteadyLimits(0.01, 0.005, 600.0);
+
     private final Path folder;
     private final Optional<InstrumentReader.Reading> instruments;
     private final Optional<RigReader.Reading> rig;
@@ -126,7 +129,7 @@ public final class CampaignReader {
                 root.findTable("definitions", CampaignReader::definitions).orElseGet(CampaignReader::usualDefinitions);
         Campaign.SteadyLimits steady =
                 root.findTable("steady", CampaignReader::steady).orElse(USUAL_LIMITS);
-        List<Logger> loggers = root.named("logger", "id", (id, t) -> LoggerReader.read(id, t, zone, findings));
+        List<Logger> loggers = root.findNamed("logger", "id", (id, t) -> LoggerReader.read(id, t, zone, findings));
         Set<String> loggerIds = loggers.stream().map(Logger::id).collect(Collectors.toSet());
         RunReader runReader = new RunReader(folder, zone, rig, loggerIds, findings);
         List<Run> runs = root.needTables("run", runReader::run);
@@ -143,9 +146,6 @@ public final class CampaignReader {
         }
         return texts;
     }
-
-    private static final double THIRD = 1.0 / 3.0;
-    private static final Campaign.SteadyLimits USUAL_LIMITS = new Campaign.SteadyLimits(0.01, 0.005, 600.0);
 
     private static Definitions usualDefinitions() {
         return new Definitions(

@@ -97,8 +97,9 @@ public final class KeyFile {
     private void unknown(KeyTable table, String key, Node node) {
         Set<String> known = new TreeSet<>(table.asked());
         String expected = known.size() <= CLOSE_ENOUGH_TO_LIST ? "one of: " + String.join(", ", known) : "a known key";
-        String remedy = Closest.to(key, known)
-                .map(close -> "Did you mean " + close + "?")
+        Optional<String> meant = Closest.to(key, known);
+        meant.ifPresent(table::isMistyped);
+        String remedy = meant.map(close -> "Did you mean " + close + "?")
                 .orElse("Remove it; the manual of campaign files lists all keys.");
         add(new Finding("KEY-UNKNOWN", Level.STOP, node.place(), node.path(), "unknown key", expected, remedy, ""));
     }
@@ -121,6 +122,11 @@ public final class KeyFile {
         if (!findings.contains(finding)) {
             findings.add(finding);
         }
+    }
+
+    void withdraw(String id, String subject) {
+        findings.removeIf(
+                finding -> finding.id().equals(id) && finding.subject().equals(subject));
     }
 
     private static Node.Table table(TomlTable table, String file, Place place, String path) {

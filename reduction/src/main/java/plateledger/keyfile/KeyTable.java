@@ -28,6 +28,7 @@ public final class KeyTable {
     private final Runnable onFault;
     private final Set<String> asked = new TreeSet<>();
     private final Set<String> faulty = new HashSet<>();
+    private final Set<String> missing = new HashSet<>();
     private boolean anyKey;
 
     KeyTable(KeyFile file, Node.Table node, String pattern, Runnable onFault) {
@@ -92,17 +93,24 @@ public final class KeyTable {
         return tables(key, Key.NONE, reader);
     }
 
-    /** The tables of a table whose keys are names that the user chooses, in the order of the file. */
-    public <T> List<T> named(String key, String placeholderName, BiFunction<String, KeyTable, T> reader) {
-        return family(key, placeholderName, Optional.empty(), reader);
+    /** The tables of a table whose keys are names that the user chooses, in the order of the file; at least one. */
+    public <T> List<T> needNamed(String key, String placeholderName, BiFunction<String, KeyTable, T> reader) {
+        missingNamed(key, placeholderName);
+        return family(key, Key.REQUIRED, placeholderName, Optional.empty(), reader);
+    }
+
+    /** As {@link #needNamed}, none where the key is absent. */
+    public <T> List<T> findNamed(String key, String placeholderName, BiFunction<String, KeyTable, T> reader) {
+        return family(key, Key.NONE, placeholderName, Optional.empty(), reader);
     }
 
     /**
-     * As {@link #named}, where a table may say by the key {@code like} that all it does not state is as in another of
+     * As {@link #needNamed}, where a table may say by the key {@code like} that all it does not state is as in another of
      * these tables: inner tables are merged, arrays are replaced as a whole.
      */
-    public <T> List<T> namedLike(String key, String placeholderName, BiFunction<String, KeyTable, T> reader) {
-        return family(key, placeholderName, Optional.of("like"), reader);
+    public <T> List<T> needNamedLike(String key, String placeholderName, BiFunction<String, KeyTable, T> reader) {
+        missingNamed(key, placeholderName);
+        return family(key, Key.REQUIRED, placeholderName, Optional.of("like"), reader);
     }
 
     /** A table of texts whose keys are names that the user chooses; empty where it is absent. */
@@ -209,6 +217,20 @@ public final class KeyTable {
             fault(key);
         } else {
             refuse(key, "KEY-MISSING", "no such key", expected, remedy);
+            missing.add(key);
+        }
+    }
+
+    /** Takes back that a key is missing, since it stands there mistyped. */
+    void isMistyped(String key) {
+        if (missing.remove(key)) {
+            file.withdraw("KEY-MISSING", node.pathOf(key));
+        }
+    }
+
+    private void missingNamed(String key, String placeholderName) {
+        if (!node.entries().containsKey(key)) {
+            missing(key, "one table or more", "Add a table [" + node.pathOf(key) + ".<" + placeholderName + ">].");
         }
     }
 
@@ -248,8 +270,12 @@ public final class KeyTable {
     }
 
     private <T> List<T> family(
-            String key, String placeholderName, Optional<String> like, BiFunction<String, KeyTable, T> reader) {
-        ask(key, "named tables", "", Key.NONE);
+            String key,
+            String fallback,
+            String placeholderName,
+            Optional<String> like,
+            BiFunction<String, KeyTable, T> reader) {
+        ask(key, "named tables", "", fallback);
         String inner = patternOf(key) + ".<" + placeholderName + ">";
         List<T> read = new ArrayList<>();
         Node found = node.entries().get(key);

@@ -45,9 +45,11 @@ sealed interface Node {
             return new Table(merged, place, path, true);
         }
 
-        /** This table, its missing keys not to be reported. */
+        /** This table, keys missing in it or in the tables inside not to be reported. */
         Table muted() {
-            return new Table(entries, place, path, true);
+            Map<String, Node> inner = new LinkedHashMap<>(entries);
+            inner.replaceAll((key, value) -> value instanceof Table table ? table.muted() : value);
+            return new Table(inner, place, path, true);
         }
 
         /** The name of a key of this table. */

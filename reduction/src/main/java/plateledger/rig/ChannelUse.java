@@ -30,38 +30,38 @@ final class ChannelUse {
 
     /** Uses a channel, or refuses the key that names it. */
     void use(KeyTable table, String key, String channel, Instrument.SignalKind kind) {
-        if (!table.sound(key)) {
-            return;
-        }
-        String former = uses.putIfAbsent(channel, table.path() + "." + key);
-        if (former != null) {
-            table.refuse(
-                    key,
-                    "RIG-CHANNEL-TWICE",
-                    "channel " + channel + ", used by " + former + " too",
-                    "a channel of its own",
-                    "");
-            return;
-        }
-        owners.ifPresent(known -> {
-            Instrument owner = known.get(channel);
-            if (owner == null) {
+        owners.ifPresent(known -> checkOwner(table, key, channel, kind, Optional.ofNullable(known.get(channel))));
+        if (table.sound(key)) {
+            String former = uses.putIfAbsent(channel, table.path() + "." + key);
+            if (former != null) {
                 table.refuse(
                         key,
-                        "RIG-CHANNEL-UNOWNED",
-                        "channel " + channel + ", which no instrument owns",
-                        "a channel in the list of an instrument",
-                        "Add it to channels of an instrument in " + InstrumentReader.FILE + ".");
-            } else if (owner.kind() != kind) {
-                table.refuse(
-                        key,
-                        "RIG-CHANNEL-KIND",
-                        "channel " + channel + " of instrument " + owner.id() + ", which measures "
-                                + InstrumentReader.word(owner.kind()),
-                        "a channel that measures " + InstrumentReader.word(kind),
+                        "RIG-CHANNEL-TWICE",
+                        "channel " + channel + ", used by " + former + " too",
+                        "a channel of its own",
                         "");
             }
-        });
+        }
+    }
+
+    private static void checkOwner(
+            KeyTable table, String key, String channel, Instrument.SignalKind kind, Optional<Instrument> owner) {
+        if (owner.isEmpty()) {
+            table.refuse(
+                    key,
+                    "RIG-CHANNEL-UNOWNED",
+                    "channel " + channel + ", which no instrument owns",
+                    "a channel in the list of an instrument",
+                    "Add it to channels of an instrument in " + InstrumentReader.FILE + ".");
+        } else if (owner.get().kind() != kind) {
+            table.refuse(
+                    key,
+                    "RIG-CHANNEL-KIND",
+                    "channel " + channel + " of instrument " + owner.get().id() + ", which measures "
+                            + InstrumentReader.word(owner.get().kind()),
+                    "a channel that measures " + InstrumentReader.word(kind),
+                    "");
+        }
     }
 
     /** Uses each channel of a list. */

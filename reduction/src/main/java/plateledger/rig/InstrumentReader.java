@@ -27,6 +27,8 @@ public final class InstrumentReader {
     /** Name of the file in the campaign folder. */
     public static final String FILE = "instruments.toml";
 
+    private static final String OF_KIND = "of the kind"; // the unit depends on another key
+
     private final Collection<Finding> findings;
     private final Map<String, String> owners = new HashMap<>();
     private final Map<String, Place> places = new LinkedHashMap<>();
@@ -75,11 +77,7 @@ public final class InstrumentReader {
     }
 
     private List<Instrument> all(KeyTable root) {
-        List<Instrument> read = root.named("instrument", "id", this::instrument);
-        if (!root.has("instrument")) {
-            root.refuse("instrument", "KEY-MISSING", "no table [instrument.<id>]", "one instrument or more", "");
-        }
-        return read;
+        return root.needNamed("instrument", "id", this::instrument);
     }
 
     private Instrument instrument(String id, KeyTable t) {
@@ -117,8 +115,6 @@ public final class InstrumentReader {
                 calibrated,
                 due);
     }
-
-    private static final String OF_KIND = "of the kind";
 
     private void own(String id, KeyTable t, List<String> channels) {
         t.require(!channels.isEmpty(), "channels", "one channel or more");

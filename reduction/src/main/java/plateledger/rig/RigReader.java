@@ -97,10 +97,7 @@ public final class RigReader {
         List<Protection> protections =
                 root.findTable("protection", RigReader::protections).orElseGet(List::of);
         noteSilence(protections);
-        List<Plate> plates = root.namedLike("plate", "id", (id, t) -> plate(id, t, channels.copy()));
-        if (!root.has("plate")) {
-            root.refuse("plate", "KEY-MISSING", "no table [plate.<id>]", "one plate or more", "");
-        }
+        List<Plate> plates = root.needNamedLike("plate", "id", (id, t) -> plate(id, t, channels.copy()));
         return new Rig(title, plates, surroundings, instruments.orElse(List.of()), limits, completed(protections));
     }
 
