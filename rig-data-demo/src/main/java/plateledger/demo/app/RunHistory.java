@@ -39,18 +39,11 @@ public final class RunHistory {
         for (int i = 0; tau(i) <= plan.durationS() + stepS; i++) {
             RunModel.Stream stream = model.stream(tau(i));
             Surround around = model.around(stream, tau(i));
-            PlateState state;
-            double[] strips;
-            if (plan.kind() == Kind.LOSS && tau(i) > 0.0) {
-                state = march.stepTo(model.targetK(tau(i)), set.length, around);
-                strips = set.clone();
-                java.util.Arrays.fill(strips, state.books().electrical() / strips.length);
-            } else {
-                strips = tau(i) > 0.0 ? set : off;
-                state = march.step(strips, around);
-            }
-            values.add(model.values(state, stream, strips));
-            truths.add(model.truth(state, stream, strips, tau(i)));
+            PlateState state = plan.kind() == Kind.LOSS && tau(i) > 0.0
+                    ? march.stepTo(model.targetK(tau(i)), around)
+                    : march.step(tau(i) > 0.0 ? set : off, around);
+            values.add(model.values(state, stream));
+            truths.add(model.truth(state, stream, tau(i)));
         }
     }
 

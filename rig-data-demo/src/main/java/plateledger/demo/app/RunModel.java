@@ -189,7 +189,8 @@ final class RunModel {
         Stream stream = stream(tau);
         Surround around = around(stream, tau);
         if (plan.kind() == Kind.LOSS) {
-            return heldLoss(stream, around, tau);
+            return new SteadyPlate(mesh, convection(stream, 0.0), rig.exchangeFactor(), around.adiabaticK())
+                    .solveHeld(targetK(tau), around);
         }
         double slope = Climate.roomSlopeKPerS(plan.startS() + tau);
         double face = stream.adiabaticK() + 0.9 * plan.riseK();
@@ -206,17 +207,7 @@ final class RunModel {
                 .solve(stripW, around, slope);
     }
 
-    /** A covered plate held at its set temperature: linear in power, so two solutions give it. */
-    private PlateState heldLoss(Stream stream, Surround around, double tau) {
-        double[] power = new double[mounted.stripOhm().length];
-        double idle = solve(stream, around, 0.0, power, 0.0).meanSheetK();
-        java.util.Arrays.fill(power, 1.0);
-        double driven = solve(stream, around, 0.0, power, 0.0).meanSheetK();
-        java.util.Arrays.fill(power, (targetK(tau) - idle) / (driven - idle));
-        return solve(stream, around, 0.0, power, 0.0);
-    }
-
-    /** Mean sheet temperature to which a loss run is brought in ten minutes and then held, K. */
+    /** Centre-line temperature to which a loss run is brought in ten minutes and then held, K. */
     double targetK(double tau) {
         double room = Climate.roomK(plan.startS());
         return room + plan.riseK() * Math.max(0.0, Math.min(1.0, tau / 600.0));
@@ -230,8 +221,9 @@ final class RunModel {
         return all;
     }
 
-    /** True values of {@link #channels()}, SI. {@code stripW} is the heat that reaches each strip. */
-    double[] values(PlateState state, Stream stream, double[] stripW) {
+    /** True values of {@link #channels()}, SI. */
+    double[] values(PlateState state, Stream stream) {
+        double[] stripW = state.stripW();
         Surround around = state.surround();
         double[] out = new double[channels().size()];
         int at = 0;
@@ -248,10 +240,10 @@ final class RunModel {
         out[at++] = around.frameK() - 0.06;
         if (plan.kind() == Kind.LOSS) {
             double inner = state.meanFaceK();
-            out[at++] = inner + 0.15;
-            out[at++] = inner - 0.15;
-            out[at++] = around.adiabaticK() + 0.1;
-            out[at++] = around.adiabaticK() - 0.1;
+            out[at++] = inner;
+            out[at++] = inner;
+            out[at++] = around.adiabaticK();
+            out[at++] = around.adiabaticK();
         }
         int strips = stripW.length;
         for (int s = 0; s < strips; s++) {
@@ -272,7 +264,8 @@ final class RunModel {
     }
 
     /** The truth at one instant, {@code tau} s after the start. */
-    RunTruth truth(PlateState state, Stream stream, double[] stripW, double tau) {
+    RunTruth truth(PlateState state, Stream stream, double tau) {
+        double[] stripW = state.stripW();
         double time = plan.startS() + tau;
         double lead = 0.0;
         for (int s = 0; s < stripW.length; s++) {

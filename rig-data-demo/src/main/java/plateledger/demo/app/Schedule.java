@@ -76,7 +76,7 @@ public final class Schedule {
             double speed = speeds[i];
             double rise = flow == Flow.PRODUCT ? 20.0 : 18.0;
             double perStrip = (expected(flow, speed) + 6.3) * AREA_M2 * rise / 8.0;
-            double minutes = speed < 2.5 ? 60.0 : speed < 5.0 ? 50.0 : speed < 8.0 ? 35.0 : 28.0;
+            double minutes = speed < 5.0 ? 60.0 : flow == Flow.TRIPPED ? 40.0 : 45.0;
             String set = String.format(
                     Locale.ROOT,
                     "%s%d",

@@ -52,7 +52,7 @@ public final class SimulatedCampaign {
             plans = options.productOnly() ? Schedule.productOnly(draws) : Schedule.full(draws);
             rig.panels().forEach((id, mounted) -> {
                 if (id.equals("product") || !options.productOnly()) {
-                    MeshedPanel mesh = new MeshedPanel(mounted.panel(), fineness);
+                    MeshedPanel mesh = MeshedPanel.of(mounted.panel(), fineness);
                     meshes.put(id, mesh);
                     if (id.equals("baseline")) {
                         layers.put(id, new LaminarLayer(responses, mesh.grid().faces()));
@@ -111,6 +111,14 @@ public final class SimulatedCampaign {
         return new RunHistory(drawn.model(plan(drawn.plans(), runId)));
     }
 
+    /** The truth of one run from the steady model on a grid of some fineness: how fine is fine enough. */
+    RunTruth steadyTruth(long seed, Options options, String runId, PlateGrid.Fineness fineness) {
+        Drawn drawn = new Drawn(seed, options, fineness);
+        RunModel model = drawn.model(plan(drawn.plans(), runId));
+        double middle = 0.5 * (model.plan().truthFromS() + model.plan().durationS());
+        return model.truth(model.steady(middle), model.stream(middle), middle);
+    }
+
     /** The product's law under some options. */
     public static ProductLaw law(Options options) {
         return ProductLaw.straight().bent(options.bend());
@@ -140,11 +148,7 @@ public final class SimulatedCampaign {
         double middle = plan.durationS() - 0.5 * span;
         RunModel.Stream stream = model.stream(middle);
         PlateState state = model.steady(middle);
-        double[] strips = model.stripW();
-        if (plan.kind() == Kind.LOSS) {
-            java.util.Arrays.fill(strips, state.books().electrical() / strips.length);
-        }
-        double[] values = model.values(state, stream, strips);
+        double[] values = model.values(state, stream);
         List<String> channels = model.channels();
         Random random = drawn.draws().generator("run:" + plan.id() + "/means");
         double size = drawn.draws().isNone() ? 0.0 : 1.0;
@@ -170,7 +174,7 @@ public final class SimulatedCampaign {
                 span,
                 slope + size * slopeError * random.nextGaussian(),
                 slopeError,
-                model.truth(state, stream, strips, middle));
+                model.truth(state, stream, middle));
     }
 
     static ChannelErrors.Moment moment(RunPlan plan) {

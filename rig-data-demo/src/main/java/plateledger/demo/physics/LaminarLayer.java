@@ -4,7 +4,7 @@ package plateledger.demo.physics;
  * Laminar convection of one plate grid as a matrix: wall flux per cell from wall temperature above T_aw per cell. The
  * flux is taken as constant in each cell, its temperature response at the cell centres is superposed from marched flux
  * steps, and the triangular matrix is inverted. It depends on the Prandtl number and the geometry only: two Prandtl
- * numbers are computed and ln–ln interpolated between.
+ * numbers are computed and interpolated between.
  */
 public final class LaminarLayer {
     private static final double PRANDTL_LOW = 0.69;
@@ -40,7 +40,9 @@ public final class LaminarLayer {
      * @param prandtl Prandtl number
      */
     public double[][] matrix(double conductivity, double unitReynolds, double prandtl) {
-        double share = Math.log(prandtl / PRANDTL_LOW) / Math.log(PRANDTL_HIGH / PRANDTL_LOW);
+        // Laminar convection goes nearly with Pr^(1/3): linear in that.
+        double base = Math.cbrt(PRANDTL_LOW);
+        double share = (Math.cbrt(prandtl) - base) / (Math.cbrt(PRANDTL_HIGH) - base);
         double scale = conductivity * Math.sqrt(unitReynolds);
         int n = low.length;
         double[][] out = new double[n][n];

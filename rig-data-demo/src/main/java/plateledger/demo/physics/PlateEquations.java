@@ -1,22 +1,23 @@
 package plateledger.demo.physics;
 
 /**
- * The discretised energy equation of the sheet
+ * The discretised energy equation of the sheet along the flow, away from the side edges,
  *
  * <pre>
- *   C ∂T/∂t = q_e − q_s − q_b + kt (∂²T/∂x² + ∂²T/∂z²)
+ *   C ∂T/∂t = q_e − q_s − q_b + kt ∂²T/∂x²
  * </pre>
  *
- * with its edges, shared by the steady and the transient solution. Everything but radiation is linear; the part of
- * radiation beyond a constant coefficient is a correction that the callers iterate.
+ * shared by the steady and the transient solution; and the span at each place about that far field. Everything but
+ * radiation is linear; the part of radiation beyond a constant coefficient is a correction that the callers iterate.
  */
 final class PlateEquations {
     static final double STEFAN_BOLTZMANN = 5.670374419e-8; // W/(m² K⁴), exact, SI Brochure 9th ed., cut
+    private static final double SMALL_DIFFERENCE_K = 0.5;
 
     private final Panel panel;
     private final PlateGrid grid;
-    private final SpanModes modes;
     private final FaceExchange face;
+    private final SpanFin fin;
     private final double exchange;
     private final double radiationCoefficient;
     private final boolean covered;
@@ -25,6 +26,7 @@ final class PlateEquations {
     private final double tail;
     private final double[] ofUnity;
     private final double[] scratch;
+    private final double[] isothermal;
     private final int along;
     private final int across;
 
@@ -42,18 +44,26 @@ final class PlateEquations {
         reference = referenceK;
         along = grid.along();
         across = grid.across();
-        modes = mesh.modes();
         covered = convection instanceof Convection.Cover;
         exchange = covered ? 0.0 : panel.emissivity() * exchangeFactor * STEFAN_BOLTZMANN;
+        fin = new SpanFin(panel, grid, exchange);
         double typical = referenceK + 10.0;
         radiationCoefficient = 4.0 * exchange * typical * typical * typical;
         double r = panel.faceM2KPerW();
+        isothermal = new double[along];
         if (convection instanceof Convection.Uniform uniform) {
             face = FaceExchange.uniform(along, uniform.coefficient() + radiationCoefficient, r);
+            java.util.Arrays.fill(isothermal, uniform.coefficient());
         } else if (convection instanceof Convection.Cover cover) {
             face = FaceExchange.uniform(along, cover.coefficient(), r);
+            java.util.Arrays.fill(isothermal, cover.coefficient());
         } else if (convection instanceof Convection.Layer layer) {
             face = FaceExchange.matrix(layer.matrix(), radiationCoefficient, r);
+            for (int i = 0; i < along; i++) {
+                for (double h : layer.matrix()[i]) {
+                    isothermal[i] += h;
+                }
+            }
         } else {
             throw new IllegalArgumentException("unknown convection " + convection);
         }
@@ -74,10 +84,6 @@ final class PlateEquations {
         return along;
     }
 
-    int across() {
-        return across;
-    }
-
     Panel panel() {
         return panel;
     }
@@ -90,47 +96,33 @@ final class PlateEquations {
         return reference;
     }
 
-    double[][] cells() {
-        return new double[across][along];
-    }
-
-    /** One factorised system per span mode for a coefficient (back, storage) that all cells have, W/(m² K). */
-    StreamwiseSystem[] factorise(double coefficient) {
-        StreamwiseSystem[] systems = new StreamwiseSystem[modes.count()];
-        for (int m = 0; m < systems.length; m++) {
-            systems[m] = new StreamwiseSystem(
-                    grid, panel.sheetWPerK(), nose, tail, coefficient + modes.conductance(m), face);
-        }
-        return systems;
-    }
-
-    /** Solves for the sheet temperature above the reference; {@code source} in W/m², both [j][i]. */
-    void solve(StreamwiseSystem[] systems, double[][] source, double[][] modal, double[][] out) {
-        modes.toModes(source, modal);
-        for (int m = 0; m < systems.length; m++) {
-            systems[m].solve(modal[m]);
-        }
-        modes.toCells(modal, out);
+    /** The factorised system for a coefficient (back, storage) that all cells have, W/(m² K). */
+    StreamwiseSystem factorise(double coefficient) {
+        return new StreamwiseSystem(grid, panel.sheetWPerK(), nose, tail, coefficient, face);
     }
 
     /** Adds strip powers, surroundings and the radiation correction to the sources, W/m². */
-    void addSources(double[] stripW, Surround around, double[][] correction, double[][] source) {
-        double[] heat = stripFlux(stripW);
+    void addSources(double[] stripW, Surround around, double[] correction, double[] source) {
+        addStrips(stripW, source);
         double above = around.adiabaticK() - reference;
-        double edge = modes.edgeConductance() * (around.frameK() - reference) / grid.width(across - 1);
-        double noseSource = nose * (around.noseK() - reference) / grid.length(0);
-        double tailSource = tail * (around.tailK() - reference) / grid.length(along - 1);
         double r = panel.faceM2KPerW();
-        for (int j = 0; j < across; j++) {
-            face.apply(correction[j], scratch);
-            for (int i = 0; i < along; i++) {
-                source[j][i] += heat[i] + ofUnity[i] * above - correction[j][i] + r * scratch[i];
-            }
-            source[j][0] += noseSource;
-            source[j][along - 1] += tailSource;
-        }
+        face.apply(correction, scratch);
         for (int i = 0; i < along; i++) {
-            source[across - 1][i] += edge;
+            source[i] += ofUnity[i] * above - correction[i] + r * scratch[i];
+        }
+        source[0] += nose * (around.noseK() - reference) / grid.length(0);
+        source[along - 1] += tail * (around.tailK() - reference) / grid.length(along - 1);
+    }
+
+    /** Adds strip powers (W) to the sources, W/m². */
+    void addStrips(double[] stripW, double[] source) {
+        double[] edges = panel.stripEdgesM();
+        int strip = 0;
+        for (int i = 0; i < along; i++) {
+            while (grid.x(i) > edges[strip + 1]) {
+                strip++;
+            }
+            source[i] += stripW[strip] / ((edges[strip + 1] - edges[strip]) * panel.widthM());
         }
     }
 
@@ -139,59 +131,68 @@ final class PlateEquations {
      *
      * @return largest change of the correction, W/m²
      */
-    double update(double[][] sheet, Surround around, double[][] correction, double[][] flux, double[][] faceK) {
+    double update(double[] sheet, Surround around, double[] correction, double[] flux, double[] faceK) {
         double r = panel.faceM2KPerW();
-        double wall4 = fourth(around.wallK());
         double change = 0.0;
-        double[] theta = new double[along];
-        for (int j = 0; j < across; j++) {
-            for (int i = 0; i < along; i++) {
-                theta[i] = sheet[j][i] + reference - around.adiabaticK() - r * correction[j][i];
-            }
-            face.apply(theta, flux[j]);
-            for (int i = 0; i < along; i++) {
-                flux[j][i] += correction[j][i];
-                double surface = sheet[j][i] + reference - r * flux[j][i];
-                faceK[j][i] = surface;
-                double next = covered
-                        ? 0.0
-                        : exchange * (fourth(surface) - wall4) - radiationCoefficient * (surface - around.adiabaticK());
-                change = Math.max(change, Math.abs(next - correction[j][i]));
-                correction[j][i] = next;
-            }
+        for (int i = 0; i < along; i++) {
+            scratch[i] = sheet[i] + reference - around.adiabaticK() - r * correction[i];
+        }
+        face.apply(scratch, flux);
+        for (int i = 0; i < along; i++) {
+            flux[i] += correction[i];
+            faceK[i] = sheet[i] + reference - r * flux[i];
+            double next = covered
+                    ? 0.0
+                    : fin.radiation(faceK[i], around) - radiationCoefficient * (faceK[i] - around.adiabaticK());
+            change = Math.max(change, Math.abs(next - correction[i]));
+            correction[i] = next;
         }
         return change;
     }
 
-    /** The state that belongs to converged fields. {@code stored} is what storage takes per area, W/m². */
-    PlateState state(
-            double[] stripW, Surround around, double[][] sheet, double[][] flux, double[][] faceK, double[][] stored) {
-        double wall4 = fourth(around.wallK());
-        double[][] sheetK = cells();
-        double[][] radiation = cells();
+    /**
+     * What of a far-field temperature the centre line of a covered plate shows: T_centre = T − share × (T − T_frame).
+     */
+    double centreShare() {
+        Surround cold = new Surround(0.0, 0.0, 0.0, 0.0, 0.0, 0.0);
+        double[] line = new double[across];
+        // At 1 K above surroundings that are all at 0: the covered plate is linear.
+        SpanFin.FarField far = new SpanFin.FarField(isothermal[0], 1.0, isothermal[0]);
+        fin.solve(far, cold, line);
+        double[][] field = new double[across][along];
+        for (int j = 0; j < across; j++) {
+            java.util.Arrays.fill(field[j], fin.sheetK(line[j], far, cold));
+        }
+        return 1.0 - grid.at(field, grid.x(along / 2), 0.0) / fin.sheetK(1.0, far, cold);
+    }
+
+    /** The state that belongs to converged far fields. {@code stored} is what storage takes per area, W/m². */
+    PlateState state(double[] stripW, Surround around, double[] sheet, double[] flux, double[] faceK, double[] stored) {
+        double[][] sheetField = new double[across][along];
+        double[][] faceField = new double[across][along];
+        double[][] fluxField = new double[across][along];
+        double[][] radiationField = new double[across][along];
+        double[] line = new double[across];
         double through = 0.0;
         double radiated = 0.0;
         double back = 0.0;
         double storage = 0.0;
-        double noseHeat = 0.0;
-        double tailHeat = 0.0;
         double edgeHeat = 0.0;
-        for (int j = 0; j < across; j++) {
-            double w = grid.width(j);
-            for (int i = 0; i < along; i++) {
-                double a = 2.0 * w * grid.length(i);
-                sheetK[j][i] = sheet[j][i] + reference;
-                radiation[j][i] = exchange * (fourth(faceK[j][i]) - wall4);
-                through += a * flux[j][i];
-                radiated += a * radiation[j][i];
-                back += a * panel.backWPerM2K() * (sheetK[j][i] - around.plenumK());
-                storage += a * stored[j][i];
-            }
-            noseHeat += 2.0 * w * nose * (sheetK[j][0] - around.noseK());
-            tailHeat += 2.0 * w * tail * (sheetK[j][along - 1] - around.tailK());
-        }
         for (int i = 0; i < along; i++) {
-            edgeHeat += 2.0 * grid.length(i) * modes.edgeConductance() * (sheetK[across - 1][i] - around.frameK());
+            SpanFin.FarField far = farField(i, flux[i], faceK[i], around);
+            fin.solve(far, around, line);
+            for (int j = 0; j < across; j++) {
+                faceField[j][i] = line[j];
+                radiationField[j][i] = fin.radiation(line[j], around);
+                fluxField[j][i] = fin.flux(line[j], far, around);
+                sheetField[j][i] = fin.sheetK(line[j], far, around);
+                double a = 2.0 * grid.width(j) * grid.length(i);
+                through += a * fluxField[j][i];
+                radiated += a * radiationField[j][i];
+                back += a * panel.backWPerM2K() * (sheetField[j][i] - around.plenumK());
+                storage += a * stored[i];
+            }
+            edgeHeat += 2.0 * grid.length(i) * fin.edgeConductance() * (sheetField[across - 1][i] - around.frameK());
         }
         double electrical = 0.0;
         for (double watts : stripW) {
@@ -204,35 +205,22 @@ final class PlateEquations {
                 covered ? through : 0.0,
                 back,
                 edgeHeat,
-                noseHeat,
-                tailHeat,
+                panel.widthM() * nose * (sheet[0] + reference - around.noseK()),
+                panel.widthM() * tail * (sheet[along - 1] + reference - around.tailK()),
                 storage);
-        return new PlateState(panel, grid, sheetK, copy(faceK), copy(flux), radiation, around, books, covered);
+        return new PlateState(
+                panel, grid, sheetField, faceField, fluxField, radiationField, around, books, covered, stripW.clone());
     }
 
-    private double[] stripFlux(double[] stripW) {
-        double[] edges = panel.stripEdgesM();
-        double[] heat = new double[along];
-        int strip = 0;
-        for (int i = 0; i < along; i++) {
-            while (grid.x(i) > edges[strip + 1]) {
-                strip++;
-            }
-            heat[i] = stripW[strip] / ((edges[strip + 1] - edges[strip]) * panel.widthM());
-        }
-        return heat;
-    }
-
-    private static double[][] copy(double[][] field) {
-        double[][] out = new double[field.length][];
-        for (int j = 0; j < field.length; j++) {
-            out[j] = field[j].clone();
-        }
-        return out;
-    }
-
-    private static double fourth(double t) {
-        double square = t * t;
-        return square * square;
+    /**
+     * The far field with its local coefficient, flux over difference. Where hardly anything is heated that would be noise
+     * over noise, and the isothermal plate's coefficient stands in.
+     */
+    private SpanFin.FarField farField(int i, double flux, double faceK, Surround around) {
+        double difference = faceK - around.adiabaticK();
+        double convection = flux - fin.radiation(faceK, around);
+        double local = convection / difference;
+        boolean clear = Math.abs(difference) > SMALL_DIFFERENCE_K && local > 0.0;
+        return new SpanFin.FarField(clear ? local : isothermal[i], faceK, convection);
     }
 }

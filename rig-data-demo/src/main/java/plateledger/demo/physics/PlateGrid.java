@@ -14,11 +14,11 @@ public record PlateGrid(double[] faces, double[] spanFaces) {
     /** How fine. */
     public enum Fineness {
         /** For thousands of campaigns. */
-        FAST(6, 1.45, 11, 0.0016),
+        FAST(6, 1.45, 14, 0.0016),
         /** For the logs. */
-        NORMAL(10, 1.22, 16, 0.0012),
+        NORMAL(10, 1.22, 24, 0.0012),
         /** For the proof that the others are fine enough. */
-        FINE(24, 1.08, 34, 0.0005);
+        FINE(24, 1.08, 48, 0.0006);
 
         private final int perStrip;
         private final double growth;

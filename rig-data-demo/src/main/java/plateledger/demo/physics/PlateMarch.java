@@ -1,19 +1,22 @@
 package plateledger.demo.physics;
 
-/** The plate in time: implicit steps of fixed length, the foam as a ladder of layers behind each cell. */
+import java.util.Optional;
+
+/** The plate in time: implicit steps of fixed length, the foam as a ladder of layers behind each cell
+ * along the flow. */
 public final class PlateMarch {
-    private static final int ROUNDS = 4;
+    private static final int ROUNDS = 12;
     private static final int LAYERS = 16;
 
     private final PlateEquations equations;
-    private final StreamwiseSystem[] systems;
+    private final StreamwiseSystem system;
     private final FoamLadder foam;
     private final double capacityRate;
-    private final double[][][] layers;
-    private double[][] sheet;
-    private final double[][] correction;
-    private final double[][] modal;
-    private double[][] before;
+    private final double[][] layers;
+    private final double[] correction;
+    private final Optional<HeldStrips> held;
+    private double[] sheet;
+    private double[] before;
 
     /**
      * The plate at rest at one temperature, the foam between it and the plenum.
@@ -36,17 +39,18 @@ public final class PlateMarch {
         equations = new PlateEquations(mesh, convection, exchangeFactor, startK);
         foam = new FoamLadder(panel.backWPerM2K(), panel.foamJPerM2K(), LAYERS, stepS, FoamLadder.FarSide.HELD);
         capacityRate = panel.capacityJPerM3K() * panel.thicknessM() / stepS;
-        systems = equations.factorise(capacityRate + foam.stepConductance());
-        sheet = equations.cells();
-        before = equations.cells();
-        correction = equations.cells();
-        modal = equations.cells();
-        layers = new double[equations.across()][equations.along()][LAYERS];
-        for (double[][] row : layers) {
-            for (double[] spot : row) {
-                for (int k = 0; k < LAYERS; k++) {
-                    spot[k] = (plenumK - startK) * (k + 0.5) / LAYERS;
-                }
+        system = equations.factorise(capacityRate + foam.stepConductance());
+        held = convection instanceof Convection.Cover
+                ? Optional.of(new HeldStrips(equations, system))
+                : Optional.empty();
+        int n = equations.along();
+        sheet = new double[n];
+        before = new double[n];
+        correction = new double[n];
+        layers = new double[n][LAYERS];
+        for (double[] spot : layers) {
+            for (int k = 0; k < LAYERS; k++) {
+                spot[k] = (plenumK - startK) * (k + 0.5) / LAYERS;
             }
         }
     }
@@ -57,85 +61,53 @@ public final class PlateMarch {
     }
 
     /**
-     * One step of a covered plate whose equal strip powers are set so that the mean sheet temperature comes out as asked
-     * (not below 0 W).
+     * One step in which the controllers of a covered plate bring the centre line to a temperature, as far as heating alone
+     * can.
      */
-    public PlateState stepTo(double meanSheetK, int strips, Surround around) {
-        double[][] history = release(around);
-        double[] none = new double[strips];
-        double[] unit = new double[strips];
-        java.util.Arrays.fill(unit, 1.0 / strips);
-        double idle = meanAfter(none, around, history);
-        double driven = meanAfter(unit, around, history);
-        double watts = Math.max(0.0, (meanSheetK - equations.referenceK() - idle) / (driven - idle));
-        double[] power = new double[strips];
-        java.util.Arrays.fill(power, watts / strips);
-        return finish(power, around, history);
-    }
-
-    private double meanAfter(double[] stripW, Surround around, double[][] history) {
-        double[][] source = copy(history);
-        double[][] out = equations.cells();
-        equations.addSources(stripW, around, correction, source);
-        equations.solve(systems, source, modal, out);
-        double sum = 0.0;
-        double area = 0.0;
-        for (int j = 0; j < equations.across(); j++) {
-            for (int i = 0; i < equations.along(); i++) {
-                double a = equations.grid().width(j) * equations.grid().length(i);
-                sum += a * out[j][i];
-                area += a;
-            }
-        }
-        return sum / area;
+    public PlateState stepTo(double centreK, Surround around) {
+        HeldStrips controllers = held.orElseThrow();
+        double[] history = release(around);
+        double[] idle = history.clone();
+        equations.addSources(new double[controllers.strips()], around, correction, idle);
+        system.solve(idle);
+        double[] powers = controllers.powers(idle, centreK, around);
+        return finish(powers, around, history);
     }
 
     /** Lets the foam relax over the step; returns what it and the sheet's capacity bring into the balance, W/m². */
-    private double[][] release(Surround around) {
+    private double[] release(Surround around) {
         double plenum = around.plenumK() - equations.referenceK();
-        double[][] history = equations.cells();
-        for (int j = 0; j < history.length; j++) {
-            for (int i = 0; i < history[j].length; i++) {
-                history[j][i] = foam.release(layers[j][i], plenum) + capacityRate * sheet[j][i];
-            }
+        double[] history = new double[layers.length];
+        for (int i = 0; i < history.length; i++) {
+            history[i] = foam.release(layers[i], plenum) + capacityRate * sheet[i];
         }
         return history;
     }
 
-    private PlateState finish(double[] stripW, Surround around, double[][] history) {
-        double[][] spare = before;
+    private PlateState finish(double[] stripW, Surround around, double[] history) {
+        double[] spare = before;
         before = sheet;
         sheet = spare;
-        double[][] flux = equations.cells();
-        double[][] face = equations.cells();
+        int n = equations.along();
+        double[] flux = new double[n];
+        double[] face = new double[n];
         for (int round = 0; round < ROUNDS; round++) {
-            double[][] source = copy(history);
-            equations.addSources(stripW, around, correction, source);
-            equations.solve(systems, source, modal, sheet);
-            if (equations.update(sheet, around, correction, flux, face) < 1e-5) {
+            System.arraycopy(history, 0, sheet, 0, n);
+            equations.addSources(stripW, around, correction, sheet);
+            system.solve(sheet);
+            if (equations.update(sheet, around, correction, flux, face) < 1e-8) {
                 break;
             }
         }
         double back = equations.panel().backWPerM2K();
         double plenum = around.plenumK() - equations.referenceK();
-        double[][] stored = equations.cells();
-        for (int j = 0; j < stored.length; j++) {
-            for (int i = 0; i < stored[j].length; i++) {
-                double t = sheet[j][i];
-                double released = history[j][i] - capacityRate * before[j][i];
-                double intoFoam = foam.stepConductance() * t - released;
-                stored[j][i] = capacityRate * (t - before[j][i]) + intoFoam - back * (t - plenum);
-                foam.complete(layers[j][i], t);
-            }
+        double[] stored = new double[n];
+        for (int i = 0; i < n; i++) {
+            double released = history[i] - capacityRate * before[i];
+            double intoFoam = foam.stepConductance() * sheet[i] - released;
+            stored[i] = capacityRate * (sheet[i] - before[i]) + intoFoam - back * (sheet[i] - plenum);
+            foam.complete(layers[i], sheet[i]);
         }
         return equations.state(stripW, around, sheet, flux, face, stored);
-    }
-
-    private static double[][] copy(double[][] field) {
-        double[][] out = new double[field.length][];
-        for (int j = 0; j < field.length; j++) {
-            out[j] = field[j].clone();
-        }
-        return out;
     }
 }

@@ -1,7 +1,7 @@
 package plateledger.demo.physics;
 
 /**
- * Fields of the plate at one instant, cells [j][i] of half the span, with what surrounds it.
+ * Fields of the plate at one instant, cells [j][i] of half the span, the edges included, with what surrounds it.
  *
  * @param panel the panel
  * @param grid the cells
@@ -12,6 +12,7 @@ package plateledger.demo.physics;
  * @param surround temperatures around
  * @param books where the heat of the whole area went
  * @param covered true in a loss run
+ * @param stripW heat into each strip, W
  */
 public record PlateState(
         Panel panel,
@@ -22,7 +23,8 @@ public record PlateState(
         double[][] radiation,
         Surround surround,
         HeatBooks books,
-        boolean covered) {
+        boolean covered,
+        double[] stripW) {
 
     /** Area mean of the face temperature, K. */
     public double meanFaceK() {
