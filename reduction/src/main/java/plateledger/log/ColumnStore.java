@@ -2,6 +2,7 @@ package plateledger.log;
 
 import java.util.ArrayList;
 import java.util.List;
+import plateledger.quantity.Unit;
 
 /** One channel while it is read: values and flags in chunks, so that nothing is copied as the file grows. */
 final class ColumnStore {
@@ -9,8 +10,7 @@ final class ColumnStore {
 
     private final String channel;
     private final String unit;
-    private final double factor;
-    private final double offset;
+    private final Unit si;
     private final int column;
     private final List<double[]> values = new ArrayList<>();
     private final List<byte[]> flags = new ArrayList<>();
@@ -24,12 +24,18 @@ final class ColumnStore {
     private Series.Flag pendingFlag = Series.Flag.EMPTY;
     private String pendingText = "";
 
-    /** A channel of a column (from 0); values are stored as {@code factor · value + offset}. */
-    ColumnStore(String channel, String unit, LogUnit si, int column) {
+    /**
+     * A channel of a column.
+     *
+     * @param channel name
+     * @param unit unit as written; empty if none is
+     * @param si the unit it stands for
+     * @param column column from 0
+     */
+    ColumnStore(String channel, String unit, Unit si, int column) {
         this.channel = channel;
         this.unit = unit;
-        this.factor = si.factor();
-        this.offset = si.offset();
+        this.si = si;
         this.column = column;
         values.add(lastValues);
         flags.add(lastFlags);
@@ -60,7 +66,7 @@ final class ColumnStore {
     void set(char[] text, int at, int length, CellNumber parser) {
         pendingFlag = parser.parse(text, at, length, unit);
         if (pendingFlag == Series.Flag.VALID) {
-            pendingValue = factor * parser.value() + offset;
+            pendingValue = si.toSi(parser.value());
         } else if (pendingFlag != Series.Flag.EMPTY && counts[pendingFlag.code()] == 0) {
             pendingText = new String(text, at, Math.min(length, 40)).strip();
         }
@@ -107,6 +113,6 @@ final class ColumnStore {
             System.arraycopy(values.get(i), 0, v, at, part);
             System.arraycopy(flags.get(i), 0, f, at, part);
         }
-        return new Series(channel, unit, file, times, v, f, lines);
+        return new Series(channel, unit.isEmpty() ? "" : si.symbol(), file, times, v, f, lines);
     }
 }

@@ -15,6 +15,7 @@ import plateledger.finding.RefusedException;
  * question, never guessed.
  */
 public final class FormatDetection {
+    private static final int JUDGED_ROWS = 40;
     private static final char[] DELIMITERS = {'\t', ';', ','};
     private static final Pattern COMMA_NUMBER = Pattern.compile("[+-]?\\d+,\\d+([eE][+-]?\\d+)?");
     private static final Pattern POINT_NUMBER = Pattern.compile("[+-]?\\d+\\.\\d+([eE][+-]?\\d+)?");
@@ -150,11 +151,9 @@ public final class FormatDetection {
             String line = in.readLine();
             for (int n = 0; line != null && first <= 12 && second <= 12; n++) {
                 if (n >= body.first) {
-                    List<String> cells = TextLine.split(line, body.delimiter);
-                    Optional<StampForm> seen =
-                            column < cells.size() ? StampForm.of(cells.get(column)) : Optional.empty();
-                    first = Math.max(first, seen.map(StampForm::first).orElse(0));
-                    second = Math.max(second, seen.map(StampForm::second).orElse(0));
+                    int[] seen = StampForm.leadingNumbers(TextLine.cell(line, body.delimiter, column));
+                    first = Math.max(first, seen[0]);
+                    second = Math.max(second, seen[1]);
                 }
                 line = in.readLine();
             }
@@ -249,7 +248,7 @@ public final class FormatDetection {
                 if (first < 0 && timed && isData(row)) {
                     first = i;
                 }
-                if (first >= 0 && !blank) {
+                if (first >= 0 && !blank && i < first + JUDGED_ROWS) {
                     cells += Math.max(columns, row.size());
                     readable += row.size() == columns ? readable(row) : 0;
                 }
@@ -280,8 +279,9 @@ public final class FormatDetection {
                     || new CellNumber(',').parse(text, 0, text.length, "") == Series.Flag.VALID;
         }
 
+        /** Some rows of data, enough to judge by. */
         List<List<String>> dataRows() {
-            return rows.subList(first, rows.size());
+            return rows.subList(first, Math.min(rows.size(), first + JUDGED_ROWS));
         }
 
         /** Index of the last row of the table's length above the data; -1 if there is none. */

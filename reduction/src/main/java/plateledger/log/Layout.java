@@ -11,6 +11,7 @@ import plateledger.finding.Finding;
 import plateledger.finding.Level;
 import plateledger.finding.Place;
 import plateledger.finding.RefusedException;
+import plateledger.quantity.Unit;
 
 /**
  * Which column of a log is what.
@@ -86,8 +87,7 @@ record Layout(int columns, int timeColumn, StampReader stamps, List<ColumnStore>
                 continue;
             }
             Place place = new Place(scan.file(), line, c + 1);
-            Optional<LogUnit> unit =
-                    title.unit().isEmpty() ? Optional.of(new LogUnit(1.0, 0.0)) : LogUnit.of(title.unit());
+            Optional<Unit> unit = title.unit().isEmpty() ? Optional.of(Unit.ONE) : LogUnit.of(title.unit());
             String name = renamed.getOrDefault(title.name(), title.name());
             if (unit.isEmpty()) {
                 findings.add(new Finding(

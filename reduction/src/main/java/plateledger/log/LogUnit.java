@@ -1,53 +1,50 @@
 package plateledger.log;
 
+import java.util.Arrays;
+import java.util.EnumSet;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
+import plateledger.quantity.Dimension;
+import plateledger.quantity.Unit;
 
-/**
- * A unit that loggers write, with the way to SI: {@code SI = factor · value + offset}.
- *
- * @param factor SI units per unit, exact (SI Brochure, 9th ed.)
- * @param offset SI value of zero
- */
-record LogUnit(double factor, double offset) {
-    private static final LogUnit SI = new LogUnit(1.0, 0.0);
-    private static final LogUnit CELSIUS = new LogUnit(1.0, 273.15);
-
-    private static final Map<String, LogUnit> KNOWN = Map.ofEntries(
-            Map.entry("\u00b0C", CELSIUS),
-            Map.entry("\u00baC", CELSIUS), // the ordinal sign, which some loggers print for the degree sign
-            Map.entry("\u2103", CELSIUS),
-            Map.entry("degC", CELSIUS),
-            Map.entry("C", CELSIUS),
-            Map.entry("K", SI),
-            Map.entry("V", SI),
-            Map.entry("mV", new LogUnit(1e-3, 0.0)),
-            Map.entry("A", SI),
-            Map.entry("mA", new LogUnit(1e-3, 0.0)),
-            Map.entry("W", SI),
-            Map.entry("Pa", SI),
-            Map.entry("hPa", new LogUnit(1e2, 0.0)),
-            Map.entry("mbar", new LogUnit(1e2, 0.0)),
-            Map.entry("kPa", new LogUnit(1e3, 0.0)),
-            Map.entry("m/s", SI),
-            Map.entry("%", new LogUnit(1e-2, 0.0)),
-            Map.entry("%rH", new LogUnit(1e-2, 0.0)),
-            Map.entry("1", SI),
-            Map.entry("s", SI));
+/** Units as loggers write them in titles and units rows. */
+final class LogUnit {
+    /** What a channel of a rig may be. */
+    private static final Set<Dimension> DIMENSIONS = EnumSet.of(
+            Dimension.NUMBER,
+            Dimension.TIME,
+            Dimension.TEMPERATURE,
+            Dimension.TEMPERATURE_DIFFERENCE,
+            Dimension.SPEED,
+            Dimension.PRESSURE,
+            Dimension.VOLTAGE,
+            Dimension.CURRENT,
+            Dimension.POWER);
 
     /** The units that can be read, for messages. */
-    static final String LIST = "\u00b0C, K, V, mV, A, mA, W, Pa, hPa, kPa, m/s, %, 1, s";
+    static final String LIST = Arrays.stream(Unit.values())
+            .filter(unit -> DIMENSIONS.contains(unit.dimension()))
+            .map(Unit::symbol)
+            .collect(Collectors.joining(", "));
+
+    private LogUnit() {}
 
     /** The unit written so; brackets around it are allowed; empty if it is not known. */
-    static Optional<LogUnit> of(String text) {
-        return Optional.ofNullable(KNOWN.get(bare(text)));
+    static Optional<Unit> of(String text) {
+        String t = bare(text).replace('\u00ba', '\u00b0'); // the ordinal sign stands for the degree sign in some logs
+        String plain = t.startsWith("%")
+                        && t.substring(1).strip().toLowerCase(Locale.ROOT).equals("rh")
+                ? "%"
+                : t;
+        return Unit.find(plain).filter(unit -> DIMENSIONS.contains(unit.dimension()));
     }
 
     /** True if the cell may stand in a units row: a known unit, nothing, or a dash. */
     static boolean mayStandInUnitsRow(String cell) {
         String bare = bare(cell);
-        return bare.isEmpty() || "-".equals(bare) || KNOWN.containsKey(bare);
+        return bare.isEmpty() || "-".equals(bare) || of(bare).isPresent();
     }
 
     /** The text without blanks and one pair of brackets around it. */

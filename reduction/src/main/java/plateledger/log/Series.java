@@ -6,7 +6,7 @@ import java.util.Arrays;
  * One channel of one log: values in SI over time. Arrays are not copied; treat them as read-only.
  *
  * @param channel channel name
- * @param unit unit as read, e.g. {@code °C}
+ * @param unit symbol of the unit as read, e.g. {@code °C}; empty if the log states none
  * @param file log file, relative to the campaign folder
  * @param timesS times, s since 1970-01-01T00:00Z on the logger's own clock as read (before clock correction), ascending
  * @param values values in SI, NaN where a cell is invalid; same length

@@ -25,6 +25,9 @@ record StampForm(LogFormat.TimeForm time, String pattern, boolean orderOpen, int
     /** The form of a cell; empty if it holds no date and time. */
     static Optional<StampForm> of(String cell) {
         String text = cell.strip();
+        if (text.length() < 12 || text.indexOf(':') < 0 || !Character.isDigit(text.charAt(0))) {
+            return Optional.empty(); // most cells are numbers: do not ask the patterns
+        }
         if (!Double.isNaN(new IsoStamps(ZoneOffset.UTC).seconds(text))) {
             return Optional.of(new StampForm(LogFormat.TimeForm.ISO, "", false, 0, 0, '-'));
         }
@@ -50,6 +53,17 @@ record StampForm(LogFormat.TimeForm time, String pattern, boolean orderOpen, int
                     LogFormat.TimeForm.PATTERN, "yyyy" + sep + "MM" + sep + "dd" + clock(ymd, 5), false, 0, 0, sep));
         }
         return Optional.empty();
+    }
+
+    /** First and second number of a date like 3/14/2026, without reading the rest; zeros if the cell begins otherwise. */
+    static int[] leadingNumbers(String cell) {
+        StampCursor cursor = new StampCursor();
+        char[] text = cell.toCharArray();
+        cursor.over(text, 0, text.length);
+        int first = cursor.digits(1, 2);
+        boolean separated = cursor.take('.') || cursor.take('/') || cursor.take('-');
+        int second = cursor.digits(1, 2);
+        return first < 0 || second < 0 || !separated ? new int[2] : new int[] {first, second};
     }
 
     /** The pattern with the month first. */

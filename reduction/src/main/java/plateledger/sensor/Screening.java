@@ -3,12 +3,12 @@ package plateledger.sensor;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
-import java.util.Set;
 import plateledger.finding.Finding;
 import plateledger.finding.Level;
 import plateledger.finding.Place;
 import plateledger.log.Series;
+import plateledger.quantity.Dimension;
+import plateledger.quantity.Unit;
 import plateledger.rig.Instrument;
 import plateledger.rig.Instrument.SignalKind;
 
@@ -18,16 +18,6 @@ import plateledger.rig.Instrument.SignalKind;
  * what is left, since the edge of a stuck stretch looks like a spike.
  */
 public final class Screening {
-    /** What units a reading of each kind may carry. */
-    private static final Map<SignalKind, Set<String>> UNITS = Map.of(
-            SignalKind.TEMPERATURE, Set.of("\u00b0C", "\u00baC", "\u2103", "degC", "C", "K"),
-            SignalKind.VOLTAGE, Set.of("V", "mV"),
-            SignalKind.CURRENT, Set.of("A", "mA"),
-            SignalKind.DIFFERENTIAL_PRESSURE, Set.of("Pa", "hPa", "mbar", "kPa"),
-            SignalKind.ABSOLUTE_PRESSURE, Set.of("Pa", "hPa", "mbar", "kPa"),
-            SignalKind.SPEED, Set.of("m/s"),
-            SignalKind.RELATIVE_HUMIDITY, Set.of("%", "%rH", "1"));
-
     private Screening() {}
 
     /**
@@ -85,6 +75,7 @@ public final class Screening {
     }
 
     private static void unit(Series series, Instrument instrument, List<Finding> findings) {
+        Dimension wanted = dimension(instrument.kind());
         if (series.unit().isEmpty()) {
             findings.add(finding(
                     "SENSOR-UNIT",
@@ -92,23 +83,29 @@ public final class Screening {
                     series,
                     0,
                     "no unit in the log",
-                    units(instrument.kind()),
+                    wanted.word() + " in " + wanted.units(),
                     "The numbers are taken as SI; write the unit into the title or a units row."));
-        } else if (!UNITS.getOrDefault(instrument.kind(), Set.of()).contains(series.unit())) {
+        } else if (Unit.find(series.unit()).filter(unit -> unit.fits(wanted)).isEmpty()) {
             findings.add(finding(
                     "SENSOR-UNIT",
                     Level.STOP,
                     series,
                     0,
                     "unit " + series.unit(),
-                    units(instrument.kind()),
+                    wanted.word() + " in " + wanted.units(),
                     "Give the channel to the right instrument, or correct the unit in the log's titles."));
         }
     }
 
-    private static String units(SignalKind kind) {
-        String word = kind.name().toLowerCase(Locale.ROOT).replace('_', ' ');
-        return "a unit of " + word;
+    private static Dimension dimension(SignalKind kind) {
+        return switch (kind) {
+            case TEMPERATURE -> Dimension.TEMPERATURE;
+            case VOLTAGE -> Dimension.VOLTAGE;
+            case CURRENT -> Dimension.CURRENT;
+            case DIFFERENTIAL_PRESSURE, ABSOLUTE_PRESSURE -> Dimension.PRESSURE;
+            case SPEED -> Dimension.SPEED;
+            case RELATIVE_HUMIDITY -> Dimension.NUMBER;
+        };
     }
 
     private static void range(Series series, Instrument instrument, byte[] flags, List<Finding> findings) {

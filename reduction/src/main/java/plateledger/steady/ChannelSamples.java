@@ -2,6 +2,7 @@ package plateledger.steady;
 
 import java.util.Arrays;
 import plateledger.log.Series;
+import plateledger.quantity.Unit;
 
 /**
  * The valid samples of one channel with running sums, so that mean and slope over any stretch cost two look-ups. Times are
@@ -198,13 +199,10 @@ final class ChannelSamples {
     }
 
     private static String siUnit(String written) {
-        return switch (written) {
-            case "\u00b0C", "\u00baC", "\u2103", "degC", "C" -> "K";
-            case "hPa", "kPa", "mbar" -> "Pa";
-            case "mV" -> "V";
-            case "mA" -> "A";
-            case "%", "%rH" -> "1";
-            default -> written;
-        };
+        return Unit.find(written)
+                .map(unit -> unit == Unit.CELSIUS
+                        ? Unit.KELVIN.symbol()
+                        : unit.dimension().siUnit().symbol())
+                .orElse(written);
     }
 }

@@ -210,7 +210,7 @@ public final class WindowFinder {
         int b = c.to(to);
         double[] values = c.values(a, b);
         MeanError error = MeanError.of(values);
-        SlopeTest slope = SlopeTest.of(c.times(a, b), values);
+        SlopeTest slope = tests.slope(c, a, b);
         double step = request.resolution().getOrDefault(c.name(), Resolution.smallestChange(values));
         double floor = Resolution.floor(values, step);
         boolean coarse = floor > error.standardError();

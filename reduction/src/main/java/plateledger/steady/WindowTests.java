@@ -1,7 +1,9 @@
 package plateledger.steady;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -22,6 +24,10 @@ final class WindowTests {
     private final double[] plateWeights;
     private final Optional<ChannelSamples> power;
     private final List<ChannelSamples> order;
+    /** Slopes fitted so far: a window that passes is asked for its evidence and its means after that. */
+    private final Map<Stretch, SlopeTest> slopes = new HashMap<>();
+
+    private record Stretch(String channel, int from, int to) {}
 
     /**
      * Tests over channels.
@@ -66,6 +72,12 @@ final class WindowTests {
     /** True if there is a plate temperature to judge storage by. */
     boolean judgesPlate() {
         return !plate.isEmpty();
+    }
+
+    /** The slope of a channel over samples a to b exclusive. */
+    SlopeTest slope(ChannelSamples c, int a, int b) {
+        return slopes.computeIfAbsent(
+                new Stretch(c.name() + "@" + c.file(), a, b), k -> SlopeTest.of(c.times(a, b), c.values(a, b)));
     }
 
     /** Every test over a stretch; the names of tests get the suffix. */
@@ -159,7 +171,7 @@ final class WindowTests {
         if (b - a < FEWEST) {
             return new Evidence("drift", c.name(), Double.POSITIVE_INFINITY, harmless, c.unit(), false);
         }
-        SlopeTest slope = SlopeTest.of(c.times(a, b), c.values(a, b));
+        SlopeTest slope = slope(c, a, b);
         double travel = slope.bound() * (end - start);
         if (travel <= harmless) {
             return new Evidence("drift", c.name(), travel, harmless, c.unit(), true);
