@@ -52,6 +52,21 @@ final class ArchitectureTest {
             entry("theory", Set.of("expression", "fluid", "numeric", "quantity", "finding")),
             entry("sensor", Set.of("log", "rig", "fluid", "uncertainty", "numeric", "quantity", "finding")),
             entry("ledger", Set.of("rig", "fluid", "theory", "uncertainty", "numeric", "quantity", "finding")),
+            entry(
+                    "safety",
+                    Set.of(
+                            "campaign",
+                            "rig",
+                            "log",
+                            "sensor",
+                            "steady",
+                            "fluid",
+                            "theory",
+                            "ledger",
+                            "uncertainty",
+                            "numeric",
+                            "quantity",
+                            "finding")),
             entry("steady", Set.of("log", "sensor", "rig", "uncertainty", "numeric", "quantity", "finding")),
             entry("fit", Set.of("expression", "uncertainty", "numeric", "quantity", "finding")),
             entry(
