@@ -77,8 +77,12 @@ public record PropertyTable(String title, List<Row> rows) {
         if (!MoistAir.inRange(t, pressurePa, x)) {
             throw new RefusedException(fault(
                     "humidity",
-                    "%s at %s: mole fraction of water %.3g"
-                            .formatted(format(relativeHumidity * 100.0, "%"), format(temperature.celsius(), "°C"), x),
+                    String.format(
+                            Locale.ROOT,
+                            "%s at %s: mole fraction of water %.3g",
+                            format(relativeHumidity * 100.0, "%"),
+                            format(temperature.celsius(), "°C"),
+                            x),
                     "a mole fraction of water up to 0.2",
                     "The humidity is meant at the temperature given; give that of the air before it was heated"));
         }

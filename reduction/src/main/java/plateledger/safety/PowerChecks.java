@@ -29,10 +29,8 @@ final class PowerChecks {
                     "SUPPLY-RATING",
                     log.run().place(),
                     log.name() + ", heater power",
-                    "voltage or current of %d of %d strips is not in its logs"
-                            .formatted(
-                                    log.plate().heaters().size() - strips.size(),
-                                    log.plate().heaters().size()),
+                    "voltage or current of " + (log.plate().heaters().size() - strips.size()) + " of "
+                            + log.plate().heaters().size() + " strips is not in its logs",
                     "Give the run the log of the heater");
         }
         for (StripPower strip : strips) {

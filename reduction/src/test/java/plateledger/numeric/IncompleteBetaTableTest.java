@@ -1,16 +1,16 @@
 package plateledger.numeric;
 
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static plateledger.validation.Recorded.assertEquals;
 
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
 import net.jqwik.api.constraints.Scale;
 import org.apache.commons.math3.special.Beta;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.Published;
 
 /** The table against the incomplete beta function of Apache Commons Math 3.6.1, and against published full values. */
 final class IncompleteBetaTableTest {
@@ -30,7 +30,7 @@ final class IncompleteBetaTableTest {
 
     /** (4/3) B(4/3, 1/3) and (10/9) B(10/9, 1/9), 14 digits from mpmath 1.3; tolerance: rounding of the summed pieces. */
     @Test
-    @Tag("validation")
+    @Published(section = "Theory", what = "full step integrals, (1/a) B(1/a, b)", source = "mpmath 1.3, 14 digits")
     void fullIntegralsAreTheBetaFunctions() {
         assertEquals(3.5332775005709, LAMINAR.full(0), 1e-12);
         assertEquals(9.8265359472165, TURBULENT.full(0), 1e-9);

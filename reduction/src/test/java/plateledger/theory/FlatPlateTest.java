@@ -1,15 +1,15 @@
 package plateledger.theory;
 
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static plateledger.validation.Recorded.assertEquals;
 
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
 import net.jqwik.api.constraints.Scale;
 import org.apache.commons.csv.CSVRecord;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.Published;
 
 /** Formulas of the flat plate against cases worked independently, and against each other. */
 final class FlatPlateTest {
@@ -23,7 +23,10 @@ final class FlatPlateTest {
 
     /** 11 to 12 digits given; tolerance 1e-10 for closed forms. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "textbook correlations",
+            source = "independent computation of the published formulas")
     void textbookFormulasMeetTheWorkedCases() {
         meets("W01", Correlation.POHLHAUSEN_LOCAL.nusselt(1.2e5, 0.71), 1e-10);
         meets("W03", Correlation.KAYS_FLUX_LOCAL.nusselt(1.2e5, 0.71), 1e-10);
@@ -44,7 +47,10 @@ final class FlatPlateTest {
 
     /** The tool's own forms; 2e-7 is the interpolation of the laminar table, 1e-9 that of the beta table. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "forms used by the tool",
+            source = "independent computation of the published formulas")
     void ownFormsMeetTheWorkedCases() {
         meets("W02", FlatPlate.uniformTemperature(LAMINAR, 1.2e5, 0.71), 2e-7);
         meets("W04", FlatPlate.uniformFlux(LAMINAR, 1.2e5, 0.71), 2e-7);
@@ -56,7 +62,10 @@ final class FlatPlateTest {
     }
 
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "unheated starting lengths",
+            source = "independent computation with SciPy special functions")
     void unheatedLengthsMeetTheWorkedCases() {
         double temperature = Correlation.POHLHAUSEN_LOCAL.nusselt(1.2e5, 0.71);
         meets("W33", temperature * UnheatedLength.temperatureFactor(LAMINAR, 0.30), 1e-10);
@@ -73,7 +82,7 @@ final class FlatPlateTest {
 
     /** Cases S1 and S2: 10 K at 0, 5 K at 0.10 m, −8 K at 0.25 m, by adding steps; digits as given. */
     @Test
-    @Tag("validation")
+    @Published(section = "Theory", what = "added steps of temperature", source = "independent computation")
     void addedStepsOfTemperatureMeetTheWorkedCases() {
         double[] places = {0.0, 0.10, 0.25};
         double[] steps = {10.0, 5.0, -8.0};
@@ -103,7 +112,10 @@ final class FlatPlateTest {
 
     /** Case A: step of temperature at 0.3 L. Tolerance 0.15 %; the classical kernel misses by 2.7 %. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "step of temperature",
+            source = "laminar energy equation marched independently")
     void stepOfTemperatureMeetsTheMarchedSolution() {
         int checked = 0;
         for (CSVRecord row : Reference.rows("marching-checks.csv")) {
@@ -121,7 +133,10 @@ final class FlatPlateTest {
 
     /** r(0.71) = 0.841736280, r(0.72) = 0.847711684 from the tabulated similarity solution; rises R1 to R3. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "recovery factors and adiabatic rises",
+            source = "independent similarity solution")
     void recoveryMeetsTheTabulation() {
         assertEquals(0.841736280, FlatPlate.exactLaminarRecovery(0.71), 2e-7);
         assertEquals(0.847711684, FlatPlate.exactLaminarRecovery(0.72), 2e-7);

@@ -1,11 +1,12 @@
 package plateledger.theory;
 
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static plateledger.validation.Recorded.assertEquals;
 
 import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.Published;
 
 /** The laminar similarity solution and its interpolation against an independent 12-digit tabulation. */
 @Tag("validation")
@@ -14,6 +15,10 @@ final class SimilarityTest {
     private static final double RELATIVE = 2e-7;
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "laminar similarity solution: uniform temperature, uniform flux, recovery",
+            source = "independent 12-digit integration")
     void tableMeetsTheTabulationOverItsRange() {
         int checked = 0;
         for (CSVRecord row : Reference.rows("similarity.csv")) {
@@ -35,6 +40,10 @@ final class SimilarityTest {
     }
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "laminar similarity solution: power-law walls",
+            source = "independent integration")
     void powerLawWallsMeetTheTabulation() {
         double[] exponents = {0.0, 0.25, 0.5, 0.75, 1.0, 1.5, 2.0, 3.0};
         for (CSVRecord row : Reference.rows("power-law-walls.csv")) {
@@ -56,6 +65,10 @@ final class SimilarityTest {
 
     /** High-Prandtl-number limit of c Pr^(−⅓), Lighthill 1950; ten digits. */
     @Test
+    @Published(
+            section = "Theory",
+            what = "limit of the laminar coefficient at high Pr",
+            source = "Lighthill, Proc. R. Soc. A 202 (1950) 359")
     void leadingConstantIsLighthills() {
         assertEquals(0.338716055593, LaminarTable.LIGHTHILL, 5e-13);
     }

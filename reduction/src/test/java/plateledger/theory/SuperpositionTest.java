@@ -1,9 +1,9 @@
 package plateledger.theory;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
+import static plateledger.validation.Recorded.assertEquals;
 
 import java.util.Arrays;
 import java.util.List;
@@ -14,8 +14,8 @@ import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
 import net.jqwik.api.constraints.Scale;
 import org.apache.commons.csv.CSVRecord;
-import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.Published;
 
 /** Superposition against solutions of the laminar energy equation by another method, and against hand-sized cases. */
 final class SuperpositionTest {
@@ -36,7 +36,10 @@ final class SuperpositionTest {
 
     /** Step of flux at 0.3 L. Tolerance 0.05 %: the two-term correction is an approximation; the classical kernel misses by 2.7 %. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "superposition: step of flux",
+            source = "laminar energy equation marched independently")
     void stepOfFluxMeetsTheMarchedSolution() {
         List<CSVRecord> rows = marching("B");
         assertEquals(14, rows.size());
@@ -52,7 +55,10 @@ final class SuperpositionTest {
 
     /** Five heated strips with adiabatic gaps. Tolerance 0.1 %, as above; the classical kernel misses by 2.6 %. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "superposition: heated strips with adiabatic gaps",
+            source = "laminar energy equation marched independently")
     void heatedStripsMeetTheMarchedSolution() {
         List<CSVRecord> rows = marching("I");
         assertEquals(36, rows.size());
@@ -66,7 +72,10 @@ final class SuperpositionTest {
 
     /** Uniform flux from the leading edge is met exactly by construction; 1e-7 is the table's interpolation. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "superposition: uniform flux",
+            source = "laminar energy equation marched independently")
     void uniformFluxFromTheLeadingEdgeIsExact() {
         for (CSVRecord row : marching("D")) {
             double x = Reference.number(row, "x_over_L");
@@ -78,7 +87,10 @@ final class SuperpositionTest {
 
     /** q = 1 + 0.5 x − 0.8 x² on 2000 cells. Tolerance 0.02 %: correction terms and cells of 1/2000. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "superposition: smooth flux",
+            source = "superposed similarity solutions, independent computation")
     void smoothFluxMeetsTheSuperposedSimilaritySolutions() {
         int cells = 2000;
         double[] edges = new double[cells + 1];
@@ -101,7 +113,10 @@ final class SuperpositionTest {
 
     /** Cases S3 and S4: four heated strips with the classical kernel and textbook coefficients; 12 digits, table 1e-9. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "classical kernel: heated strips",
+            source = "independent computation with SciPy special functions")
     void classicalKernelMeetsTheWorkedStrips() {
         double[] edges = {0.05, 0.10, 0.15, 0.20, 0.25, 0.30, 0.35, 0.40};
         double[] flux = {800.0, 0.0, 800.0, 0.0, 800.0, 0.0, 800.0};
@@ -134,7 +149,10 @@ final class SuperpositionTest {
 
     /** S9: uniform flux from 0.3 x, turbulent with 0.0296; here 0.0287, so the ratio of coefficients is divided out. */
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "superposition: turbulent step of flux",
+            source = "independent computation with SciPy special functions")
     void turbulentStepOfFluxMeetsTheWorkedCase() {
         double[] out = new double[1];
         Superposition.wallDifference(
@@ -152,7 +170,10 @@ final class SuperpositionTest {
     }
 
     @Test
-    @Tag("validation")
+    @Published(
+            section = "Theory",
+            what = "constants of the step integrals",
+            source = "mpmath and SciPy special functions")
     void integralConstantsMeetTheWorkedCases() {
         assertEquals(3.5332775005709, StepIntegral.between(LayerLaw.LAMINAR, 0.0, 2.0, 2.0) / 2.0, 3e-9);
         assertEquals(9.826535947, StepIntegral.between(LayerLaw.TURBULENT, -1.0, 9.0, 2.0) / 2.0, 9e-9);

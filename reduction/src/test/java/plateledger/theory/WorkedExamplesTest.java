@@ -1,8 +1,8 @@
 package plateledger.theory;
 
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.Assertions.fail;
+import static plateledger.validation.Recorded.assertEquals;
 
 import java.util.HashMap;
 import java.util.List;
@@ -10,6 +10,7 @@ import java.util.Map;
 import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import plateledger.validation.Published;
 
 /**
  * Published textbook examples with the inputs of the example. Marked OK: the published answer to half a unit of its last
@@ -21,6 +22,10 @@ final class WorkedExamplesTest {
     private static final double PER_DAY = 86400.0;
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "textbook examples: laminar, isothermal, averages",
+            source = "published examples FC01, FC05, FC15, FC16 (see worked-examples.csv)")
     void laminarIsothermalAverages() {
         Example fc01 = new Example("FC01");
         double nu = fc01.in("nu_1atm") * fc01.in("p0") / fc01.in("p");
@@ -49,6 +54,10 @@ final class WorkedExamplesTest {
     }
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "textbook examples: laminar, isothermal, local and strips",
+            source = "published examples FC21, FC22, FC23, FC26, FC35 (see worked-examples.csv)")
     void laminarIsothermalLocalValuesAndStrips() {
         Example fc21 = new Example("FC21");
         double re21 = fc21.in("U") * fc21.in("L") / fc21.in("nu");
@@ -83,6 +92,10 @@ final class WorkedExamplesTest {
     }
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "textbook examples: laminar, uniform flux",
+            source = "published examples FC06, FC17 (see worked-examples.csv)")
     void laminarUniformFlux() {
         Example fc06 = new Example("FC06");
         double flux = fc06.in("P") / (fc06.in("L") * fc06.in("L"));
@@ -103,6 +116,10 @@ final class WorkedExamplesTest {
     }
 
     @Test
+    @Published(
+            section = "Theory",
+            what = "textbook examples: turbulent",
+            source = "published examples FC11, FC27 (see worked-examples.csv)")
     void turbulentTripped() {
         Example fc11 = new Example("FC11");
         double re11 = fc11.in("rho") * fc11.in("U") * fc11.in("L") / fc11.in("mu");
@@ -116,6 +133,10 @@ final class WorkedExamplesTest {
 
     /** Evaporation from a basin behind a dry start: the mass-transfer twin of the unheated length. */
     @Test
+    @Published(
+            section = "Theory",
+            what = "textbook example: turbulent, dry start",
+            source = "published example FC03 (see worked-examples.csv)")
     void turbulentUnheatedStart() {
         Example fc03 = new Example("FC03");
         double length = fc03.in("L_water") + fc03.in("xi");

@@ -73,6 +73,22 @@ public final class ValidationRecorder implements AutoCloseable {
         assertWithin(deviation, tolerance, expected, actual, label);
     }
 
+    /**
+     * Asserts |actual − expected| ≤ tolerance like {@link #absolute}, but records the deviation relative to the expected value
+     * where that is not 0.
+     */
+    public void within(double expected, double actual, double tolerance, String label) {
+        if (expected == 0.0) {
+            absolute(expected, actual, tolerance, label);
+            return;
+        }
+        double deviation = Math.abs(actual - expected);
+        values++;
+        double relative = deviation / Math.abs(expected);
+        largestRelative = Double.isNaN(largestRelative) ? relative : Math.max(largestRelative, relative);
+        assertWithin(deviation, tolerance, expected, actual, label);
+    }
+
     private static void assertWithin(double deviation, double tolerance, double expected, double actual, String label) {
         // Written so that NaN fails.
         assertTrue(
