@@ -1,0 +1,5 @@
+/** Tests. */
+@NullMarked
+package plateledger.gui.chart;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,51 @@
+package plateledger.gui.model;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.Locale;
+import org.junit.jupiter.api.Test;
+import plateledger.quantity.Estimate;
+
+final class RoundedTest {
+    /** Factors t_95(v): JCGM 100:2008, table G.2, printed to two decimals, hence the tolerance of half a unit. */
+    @Test
+    void intervalUsesStudentFactorOfTheDegreesOfFreedom() {
+        assertEquals(2.57, Rounded.u95(new Estimate(10.0, 1.0, 5.0)), 0.005);
+        assertEquals(2.23, Rounded.u95(new Estimate(10.0, 1.0, 10.0)), 0.005);
+        assertEquals(1.960, Rounded.u95(Estimate.of(10.0, 1.0)), 0.0005);
+    }
+
+    @Test
+    void valueIsRoundedToTwoDigitsOfItsInterval() {
+        assertEquals("1734 ± 51", Rounded.withInterval(1734.4, 51.3));
+        assertEquals("300.0 ± 8.8", Rounded.withInterval(300.0, 8.82));
+        assertEquals("62500 ± 1100", Rounded.withInterval(62_480.0, 1_140.0));
+        assertEquals("-0.0120 ± 0.0034", Rounded.withInterval(-0.01203, 0.00341));
+    }
+
+    @Test
+    void largeNumbersCarryAPowerOfTen() {
+        assertEquals("(1.250 ± 0.013)·10⁶", Rounded.withInterval(1.25e6, 1.3e4));
+    }
+
+    @Test
+    void whatIsNotKnownIsADashAndExactValuesStandAlone() {
+        assertEquals("–", Rounded.withInterval(Double.NaN, 1.0));
+        assertEquals("50", Rounded.withInterval(50.0, 0.0));
+        assertTrue(Double.isNaN(Rounded.u95(new Estimate(Double.NaN, 0.0, 5.0))));
+    }
+
+    @Test
+    void decimalMarkIsAPointInEveryLocale() {
+        Locale before = Locale.getDefault();
+        try {
+            Locale.setDefault(Locale.GERMANY);
+            assertEquals("300.0 ± 8.8", Rounded.withInterval(300.0, 8.82));
+            Locale.setDefault(Locale.forLanguageTag("ar-EG"));
+            assertEquals("300.0 ± 8.8", Rounded.withInterval(300.0, 8.82));
+        } finally {
+            Locale.setDefault(before);
+        }
+    }
+}

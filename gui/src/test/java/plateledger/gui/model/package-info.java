@@ -1,0 +1,5 @@
+/** Tests. */
+@NullMarked
+package plateledger.gui.model;
+
+import org.jspecify.annotations.NullMarked;

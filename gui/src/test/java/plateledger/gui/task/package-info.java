@@ -1,0 +1,5 @@
+/** Tests. */
+@NullMarked
+package plateledger.gui.task;
+
+import org.jspecify.annotations.NullMarked;
