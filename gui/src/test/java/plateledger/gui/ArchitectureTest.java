@@ -35,7 +35,7 @@ final class ArchitectureTest {
     private static final String SWING = "javax.swing..";
 
     private static final Map<String, Set<String>> MAY_USE = Map.ofEntries(
-            entry("model", Set.of("org.apache.commons.math3..")),
+            entry("model", Set.of()),
             entry(
                     "chart",
                     Set.of(

@@ -76,7 +76,7 @@ enum Appearance {
     }
 
     private static java.util.Optional<String> register(GraphicsEnvironment graphics, String name) {
-        try (InputStream bytes = Appearance.class.getResourceAsStream("/report/fonts/" + name)) {
+        try (InputStream bytes = Appearance.class.getResourceAsStream("/plateledger/report/fonts/" + name)) {
             if (bytes == null) {
                 return java.util.Optional.of("the letters " + name + " are missing");
             }

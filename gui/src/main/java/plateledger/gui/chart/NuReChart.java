@@ -21,7 +21,7 @@ import plateledger.gui.model.NuRe;
 import plateledger.gui.model.NuRe.Curve;
 import plateledger.gui.model.NuRe.Group;
 import plateledger.gui.model.NuRe.Point;
-import plateledger.gui.model.Rounded;
+import plateledger.gui.model.NumberText;
 
 /** Nu_L over Re_L: runs with their intervals, theory, and fits with their bands, both axes logarithmic. */
 public final class NuReChart {
@@ -88,7 +88,7 @@ public final class NuReChart {
             }
         }
         renderer.setDefaultToolTipGenerator((d, series, item) ->
-                "%s: Nu_L = %s".formatted(d.getSeriesKey(series), Rounded.plain(d.getYValue(series, item))));
+                "%s: Nu_L = %s".formatted(d.getSeriesKey(series), NumberText.plain(d.getYValue(series, item))));
         plot.setRenderer(1, renderer);
         plot.setDataset(1, data);
     }
@@ -129,7 +129,10 @@ public final class NuReChart {
         renderer.setDefaultToolTipGenerator((d, series, item) -> {
             Point p = groups.get(series).points().get(item);
             return "%s: Re_L = %s, Nu_L = %s"
-                    .formatted(p.runId(), Rounded.withInterval(p.re(), p.reU()), Rounded.withInterval(p.nu(), p.nuU()));
+                    .formatted(
+                            p.runId(),
+                            NumberText.withInterval(p.re(), p.reU()),
+                            NumberText.withInterval(p.nu(), p.nuU()));
         });
         plot.setRenderer(3, renderer);
         plot.setDataset(3, data);

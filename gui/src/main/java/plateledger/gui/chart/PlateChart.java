@@ -22,10 +22,10 @@ import org.jfree.data.xy.XYIntervalSeriesCollection;
 import org.jfree.data.xy.XYSeries;
 import org.jfree.data.xy.XYSeriesCollection;
 import plateledger.gui.model.HeatPart;
+import plateledger.gui.model.NumberText;
 import plateledger.gui.model.PlateProfile;
 import plateledger.gui.model.PlateProfile.Station;
 import plateledger.gui.model.PlateSection.Strip;
-import plateledger.gui.model.Rounded;
 
 /** One run along the plate: temperatures above, the plate in section, booked heat below, on one x axis. */
 public final class PlateChart {
@@ -66,7 +66,7 @@ public final class PlateChart {
             line.setSeriesPaint(0, look.line());
             line.setSeriesStroke(0, PlotFrame.dashed(1.4f));
             line.setDefaultToolTipGenerator((data, series, item) -> at(stations.get(item)) + "T_s of theory "
-                    + Rounded.plain(stations.get(item).theoryC()) + " °C");
+                    + NumberText.plain(stations.get(item).theoryC()) + " °C");
             layer(plot, 0, new XYSeriesCollection(theory), line);
         }
         XYIntervalSeries reference = new XYIntervalSeries("reference (adiabatic wall)");
@@ -75,7 +75,7 @@ public final class PlateChart {
         referenceMarks.setSeriesShapesFilled(0, false);
         referenceMarks.setSeriesLinesVisible(0, true);
         referenceMarks.setDefaultToolTipGenerator((data, series, item) -> at(stations.get(item)) + "T_ref "
-                + Rounded.withInterval(
+                + NumberText.withInterval(
                         stations.get(item).referenceC(), stations.get(item).referenceU()) + " °C");
         layer(plot, 1, collection(reference), referenceMarks);
 
@@ -83,7 +83,7 @@ public final class PlateChart {
         stations.forEach(s -> add(surface, s.xMm(), s.surfaceC(), s.surfaceU()));
         XYErrorRenderer surfaceMarks = marks(0, 6.0, look.of(OkabeIto.VERMILLION), look);
         surfaceMarks.setDefaultToolTipGenerator((data, series, item) -> at(stations.get(item)) + "T_s "
-                + Rounded.withInterval(
+                + NumberText.withInterval(
                         stations.get(item).surfaceC(), stations.get(item).surfaceU()) + " °C");
         layer(plot, 2, collection(surface), surfaceMarks);
         return plot;
@@ -122,7 +122,7 @@ public final class PlateChart {
         heater.setSeriesPaint(0, look.line());
         heater.setSeriesStroke(0, PlotFrame.line(1.8f));
         heater.setDefaultToolTipGenerator(
-                (data, series, item) -> "heater flux " + Rounded.plain(data.getYValue(series, item)) + " W/m²");
+                (data, series, item) -> "heater flux " + NumberText.plain(data.getYValue(series, item)) + " W/m²");
         layer(plot, 2, new XYSeriesCollection(heaterFlux(profile, stations)), heater);
         return plot;
     }
@@ -163,8 +163,8 @@ public final class PlateChart {
         bars.setDefaultToolTipGenerator((data, series, item) -> {
             Station s = stations.get(item);
             HeatPart part = parts.get(series);
-            return at(s) + part.label() + " " + Rounded.withInterval(s.part(part), s.partU(part)) + " W/m² of "
-                    + Rounded.plain(s.electrical()) + " W/m²";
+            return at(s) + part.label() + " " + NumberText.withInterval(s.part(part), s.partU(part)) + " W/m² of "
+                    + NumberText.plain(s.electrical()) + " W/m²";
         });
         return bars;
     }
@@ -238,6 +238,6 @@ public final class PlateChart {
     }
 
     private static String at(Station station) {
-        return "%s, x = %s mm: ".formatted(station.channel(), Rounded.plain(station.xMm()));
+        return "%s, x = %s mm: ".formatted(station.channel(), NumberText.plain(station.xMm()));
     }
 }

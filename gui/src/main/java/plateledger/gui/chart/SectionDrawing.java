@@ -271,7 +271,7 @@ final class SectionDrawing extends AbstractXYAnnotation {
     }
 
     private static String digits(double mm) {
-        return plateledger.gui.model.Rounded.plain(mm);
+        return plateledger.gui.model.NumberText.plain(mm);
     }
 
     @Override

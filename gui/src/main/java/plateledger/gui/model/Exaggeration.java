@@ -26,6 +26,6 @@ public final class Exaggeration {
 
     /** E.g. {@code ×20}; {@code to scale} for 1. */
     public static String words(double factor) {
-        return factor == 1.0 ? "to scale" : "×" + Rounded.plain(factor);
+        return factor == 1.0 ? "to scale" : "×" + NumberText.plain(factor);
     }
 }

@@ -101,7 +101,7 @@ public record NuRe(List<Group> groups, List<Curve> fits) {
         double theory =
                 run.regime() == Regime.PRODUCT ? Double.NaN : v.nuLTheory().value();
         return new Point(
-                run.id(), v.reL().value(), Rounded.u95(v.reL()), v.nuL().value(), Rounded.u95(v.nuL()), theory);
+                run.id(), v.reL().value(), NumberText.u95(v.reL()), v.nuL().value(), NumberText.u95(v.nuL()), theory);
     }
 
     /** Nu = C Re^m Pr^n at the geometric mean Pr of the points; the band is that of the curve, not of a new point. */
@@ -135,11 +135,11 @@ public record NuRe(List<Group> groups, List<Curve> fits) {
                 .formatted(
                         fit.problem().id(),
                         exponent(fit.problem().prandtlExponent()),
-                        Rounded.withInterval(c.c(), c.c() * k * c.uLnC()),
-                        Rounded.withInterval(c.m(), k * c.uM()));
+                        NumberText.withInterval(c.c(), c.c() * k * c.uLnC()),
+                        NumberText.withInterval(c.m(), k * c.uM()));
     }
 
     private static String exponent(double n) {
-        return Math.abs(n - 1.0 / 3.0) < 1e-9 ? "¹ᐟ³" : "^" + Rounded.plain(n);
+        return Math.abs(n - 1.0 / 3.0) < 1e-9 ? "¹ᐟ³" : "^" + NumberText.plain(n);
     }
 }

@@ -92,15 +92,15 @@ public record PlateProfile(String runId, PlateSection section, List<Station> sta
         for (HeatPart part : HeatPart.values()) {
             Estimate flux = part.of(s);
             parts.put(part, flux.value());
-            partsU.put(part, Rounded.u95(flux));
+            partsU.put(part, NumberText.u95(flux));
         }
         return new Station(
                 s.channel(),
                 s.x().value() * MM_PER_M,
                 celsius(s.surface().value()),
-                Rounded.u95(s.surface()),
+                NumberText.u95(s.surface()),
                 celsius(s.reference().value()),
-                Rounded.u95(s.reference()),
+                NumberText.u95(s.reference()),
                 celsius(theoryK(s)),
                 s.qElectrical().value(),
                 parts,

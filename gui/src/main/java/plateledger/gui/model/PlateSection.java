@@ -48,8 +48,8 @@ public record PlateSection(
         /** E.g. {@code coat 50 µm matt black paint}. */
         public String words() {
             String thickness = thicknessMm < 0.1
-                    ? Rounded.plain(thicknessMm * MM_PER_M) + " µm"
-                    : Rounded.plain(thicknessMm) + " mm";
+                    ? NumberText.plain(thicknessMm * MM_PER_M) + " µm"
+                    : NumberText.plain(thicknessMm) + " mm";
             return kind.name().toLowerCase(Locale.ROOT) + " " + thickness + " " + material;
         }
     }

@@ -101,17 +101,18 @@ public record RunRow(
                 result.state().word(),
                 result.reason(),
                 run.set(),
-                speed.map(e -> new Cell(e.value(), Rounded.toInterval(e))).orElseGet(() -> asSet(run.speedSetMPerS())),
-                power.map(e -> new Cell(e.value(), Rounded.toInterval(e))).orElseGet(() -> asSet(run.powerSetW())),
-                speed.map(Rounded::withInterval).orElse("not measured"),
-                power.map(Rounded::withInterval).orElse("not measured"),
-                values.map(v -> new Cell(v.nuL().value(), Rounded.withInterval(v.nuL())))
+                speed.map(e -> new Cell(e.value(), NumberText.toInterval(e)))
+                        .orElseGet(() -> asSet(run.speedSetMPerS())),
+                power.map(e -> new Cell(e.value(), NumberText.toInterval(e))).orElseGet(() -> asSet(run.powerSetW())),
+                speed.map(NumberText::withInterval).orElse("not measured"),
+                power.map(NumberText::withInterval).orElse("not measured"),
+                values.map(v -> new Cell(v.nuL().value(), NumberText.withInterval(v.nuL())))
                         .orElse(Cell.NONE),
                 own.size(),
                 own.stream().map(Finding::level).min(Level::compareTo));
     }
 
     private static Cell asSet(double value) {
-        return Double.isFinite(value) ? new Cell(value, "set " + Rounded.plain(value)) : Cell.NONE;
+        return Double.isFinite(value) ? new Cell(value, "set " + NumberText.plain(value)) : Cell.NONE;
     }
 }

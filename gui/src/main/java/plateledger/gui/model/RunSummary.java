@@ -53,7 +53,7 @@ public record RunSummary(String title, List<Fact> facts) {
         if (v.nuLTheory().isKnown()) {
             facts.add(fact("theory", v.nuLTheory(), "", "Nu_L of theory for this rig, 95 % interval of the theory"));
             facts.add(new Fact(
-                    "E_n", Rounded.plain(Math.round(v.en() * 100.0) / 100.0), "agreement with theory is |E_n| ≤ 1"));
+                    "E_n", NumberText.plain(Math.round(v.en() * 100.0) / 100.0), "agreement with theory is |E_n| ≤ 1"));
         }
         facts.add(fact("h", v.h(), " W/(m²·K)", "average heat transfer coefficient, 95 % interval"));
         facts.add(fact("Q", v.ledger(LedgerTerm.ELECTRICAL), " W", "electrical power, 95 % interval"));
@@ -66,7 +66,7 @@ public record RunSummary(String title, List<Fact> facts) {
     }
 
     private static Fact fact(String symbol, Estimate estimate, String unit, String meaning) {
-        String number = Rounded.withInterval(estimate);
+        String number = NumberText.withInterval(estimate);
         boolean bracket = !unit.isEmpty() && number.contains("±");
         return new Fact(symbol, (bracket ? "(" + number + ")" : number) + unit, meaning);
     }
