@@ -5,7 +5,10 @@ import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static java.util.Map.entry;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import com.tngtech.archunit.core.domain.JavaCall;
+import com.tngtech.archunit.core.domain.JavaClass;
 import com.tngtech.archunit.core.domain.JavaClasses;
+import com.tngtech.archunit.core.domain.properties.HasOwner;
 import com.tngtech.archunit.core.importer.ImportOption;
 import com.tngtech.archunit.junit.AnalyzeClasses;
 import com.tngtech.archunit.junit.ArchTest;
@@ -14,6 +17,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import org.jfree.chart.axis.Axis;
 
 /** The arrows inside the desktop program. The last two rules guard the table itself. */
 @AnalyzeClasses(packages = "plateledger.gui", importOptions = ImportOption.DoNotIncludeTests.class)
@@ -81,6 +85,21 @@ final class ArchitectureTest {
 
     @ArchTest
     static final ArchRule swingIsComposedNotExtended = noClasses().should().beAssignableTo(java.awt.Component.class);
+
+    @ArchTest
+    static final ArchRule onlyChartsUseTheChartLibrary = noClasses()
+            .that()
+            .resideOutsideOfPackage("plateledger.gui.chart..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage("org.jfree..");
+
+    /** Axes come from the factory of the report alone; nothing here makes one. */
+    @ArchTest
+    static final ArchRule noAxisIsMadeHere = noClasses()
+            .should()
+            .callConstructorWhere(JavaCall.Predicates.target(
+                    HasOwner.Predicates.With.owner(JavaClass.Predicates.assignableTo(Axis.class))));
 
     @ArchTest
     static final ArchRule everyPackageIsInTheTable = classes()

@@ -12,7 +12,7 @@ import java.util.List;
 import java.util.stream.Stream;
 import javax.swing.Icon;
 import javax.swing.ImageIcon;
-import plateledger.gui.chart.OkabeIto;
+import plateledger.report.Palette;
 
 /** The program's own mark: a plate, the boundary layer growing above it, the booked heat in columns below it. */
 final class AppIcon {
@@ -55,9 +55,9 @@ final class AppIcon {
 
     private static void column(Graphics2D g, double x, double height) {
         double upper = 0.7 * height;
-        g.setColor(OkabeIto.BLUE.color());
+        g.setColor(Palette.INDIGO);
         g.fill(new Rectangle2D.Double(x, 18.2, 4, upper));
-        g.setColor(OkabeIto.ORANGE.color());
+        g.setColor(Palette.ROSE);
         g.fill(new Rectangle2D.Double(x, 18.2 + upper, 4, height - upper));
     }
 }

@@ -14,6 +14,7 @@ import java.util.Map;
 import javax.swing.UIManager;
 import javax.swing.plaf.FontUIResource;
 import plateledger.gui.chart.ChartLook;
+import plateledger.report.Fonts;
 
 /** The appearances of the window: plain light and dark grounds with the program's own accent and letters. */
 enum Appearance {
@@ -24,7 +25,6 @@ enum Appearance {
 
     private static final String LIGHT_ACCENT = "#14666e";
     private static final String DARK_ACCENT = "#4fa8ad";
-    private static final String FAMILY = "DejaVu Sans";
     private static final float SIZE = 12f;
     private static final List<String> LETTERS =
             List.of("DejaVuSans.ttf", "DejaVuSans-Bold.ttf", "DejaVuSans-Oblique.ttf");
@@ -60,7 +60,7 @@ enum Appearance {
 
     /** The program's letters; those of the machine where the bundled ones cannot be read. */
     private static Font letters() {
-        return new Font(FAMILY, Font.PLAIN, Math.round(SIZE));
+        return new Font(Fonts.FAMILY, Font.PLAIN, Math.round(SIZE));
     }
 
     /**

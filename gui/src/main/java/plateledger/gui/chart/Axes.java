@@ -1,18 +1,13 @@
 package plateledger.gui.chart;
 
-import java.awt.BasicStroke;
 import java.awt.font.TextAttribute;
 import java.text.AttributedString;
-import java.text.DecimalFormat;
-import java.text.DecimalFormatSymbols;
-import java.util.Locale;
 import java.util.Optional;
-import org.jfree.chart.axis.LogAxis;
 import org.jfree.chart.axis.NumberAxis;
-import org.jfree.chart.axis.NumberTickUnitSource;
 import org.jfree.chart.axis.ValueAxis;
+import plateledger.report.ChartAxes;
 
-/** Makes every axis of the desktop program, so that all read alike and print the same digits in every locale. */
+/** Axes of the shared factory, dressed for the look of the window. */
 final class Axes {
     private static final double MARGIN = 0.06;
 
@@ -20,20 +15,20 @@ final class Axes {
 
     /** A linear axis whose range follows its data without forcing zero into it. */
     static NumberAxis linear(String title, ChartLook look) {
-        NumberAxis axis = new NumberAxis(title);
-        DecimalFormat format = new DecimalFormat("0.###", DecimalFormatSymbols.getInstance(Locale.ROOT));
-        axis.setStandardTickUnits(new NumberTickUnitSource(false, format));
-        axis.setAutoRangeIncludesZero(false);
+        NumberAxis axis = ChartAxes.linear(title);
         axis.setLowerMargin(MARGIN);
         axis.setUpperMargin(MARGIN);
-        return dressed(axis, look);
+        axis.setMinorTickMarksVisible(false);
+        dress(axis, look);
+        return axis;
     }
 
     /** A logarithmic axis over a range, with labels at 1, 2 and 5. */
-    static LogAxis logarithmic(String title, double low, double high, ChartLook look) {
-        LogAxis axis = dressed(new DecadeAxis(title), look);
+    static ValueAxis logarithmic(String title, double low, double high, ChartLook look) {
+        ValueAxis axis = ChartAxes.logarithmic(title);
         axis.setAutoRange(false);
         axis.setRange(low, high);
+        dress(axis, look);
         return axis;
     }
 
@@ -53,7 +48,7 @@ final class Axes {
         return Optional.of(text);
     }
 
-    private static <A extends ValueAxis> A dressed(A axis, ChartLook look) {
+    private static void dress(ValueAxis axis, ChartLook look) {
         axis.setLabelFont(look.small());
         Optional.ofNullable(axis.getLabel())
                 .flatMap(title -> lowered(title, look))
@@ -62,10 +57,6 @@ final class Axes {
         axis.setLabelPaint(look.line());
         axis.setTickLabelPaint(look.line());
         axis.setAxisLinePaint(look.thinned(0.6));
-        axis.setAxisLineStroke(new BasicStroke(1f));
         axis.setTickMarkPaint(look.thinned(0.6));
-        axis.setTickMarkOutsideLength(4f);
-        axis.setMinorTickMarkOutsideLength(2f);
-        return axis;
     }
 }

@@ -14,6 +14,7 @@ import java.awt.Font;
  */
 public record ChartLook(Color ground, Color ink, Font font, Brightness brightness, double strength) {
     private static final double FORMER_STRENGTH = 0.38;
+    private static final double DARK_GROUND_LIGHTNESS = 0.5;
 
     /** Ground of a theme. */
     public enum Brightness {
@@ -38,10 +39,12 @@ public record ChartLook(Color ground, Color ink, Font font, Brightness brightnes
         return new ChartLook(ground, ink, font, brightness, FORMER_STRENGTH);
     }
 
-    /** A colour of the palette as it is drawn on this ground. Blue is too dark for a dark ground: sky blue stands in. */
-    public Color of(OkabeIto hue) {
-        OkabeIto drawn = hue == OkabeIto.BLUE && brightness == Brightness.DARK ? OkabeIto.SKY_BLUE : hue;
-        return towardsGround(drawn.color(), strength);
+    /**
+     * A colour of the palette as it is drawn on this ground. On a dark ground the scheme's darkest hues would vanish: they
+     * are lightened, each by as much as it needs, so that their order of hues stays.
+     */
+    public Color of(Color hue) {
+        return towardsGround(brightness == Brightness.DARK ? lightened(hue) : hue, strength);
     }
 
     /** Letters and outlines. */
@@ -62,6 +65,22 @@ public record ChartLook(Color ground, Color ink, Font font, Brightness brightnes
     /** Letters of marks within a picture. */
     Font tiny() {
         return font.deriveFont(Math.max(8f, font.getSize2D() - 3f));
+    }
+
+    /** Mixed with white until it is as light as {@link #DARK_GROUND_LIGHTNESS} at least. */
+    private static Color lightened(Color hue) {
+        double lightness = lightness(hue);
+        if (lightness >= DARK_GROUND_LIGHTNESS) {
+            return hue;
+        }
+        double white = (DARK_GROUND_LIGHTNESS - lightness) / (1.0 - lightness);
+        return new Color(
+                mix(255, hue.getRed(), white), mix(255, hue.getGreen(), white), mix(255, hue.getBlue(), white));
+    }
+
+    /** Luma by the weights of ITU-R BT.709, 0..1. */
+    private static double lightness(Color c) {
+        return (0.2126 * c.getRed() + 0.7152 * c.getGreen() + 0.0722 * c.getBlue()) / 255.0;
     }
 
     private Color towardsGround(Color color, double share) {

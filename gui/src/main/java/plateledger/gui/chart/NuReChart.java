@@ -6,7 +6,7 @@ import java.util.Optional;
 import java.util.stream.DoubleStream;
 import java.util.stream.Stream;
 import org.jfree.chart.JFreeChart;
-import org.jfree.chart.axis.LogAxis;
+import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.DeviationRenderer;
 import org.jfree.chart.renderer.xy.XYErrorRenderer;
@@ -22,6 +22,7 @@ import plateledger.gui.model.NuRe.Curve;
 import plateledger.gui.model.NuRe.Group;
 import plateledger.gui.model.NuRe.Point;
 import plateledger.gui.model.NumberText;
+import plateledger.report.Palette;
 
 /** Nu_L over Re_L: runs with their intervals, theory, and fits with their bands, both axes logarithmic. */
 public final class NuReChart {
@@ -29,15 +30,13 @@ public final class NuReChart {
     private static final double MARK = 7.0;
     private static final double RING = 15.0;
     private static final int BAND_ALPHA = 60;
-    private static final List<OkabeIto> GROUP_HUES =
-            List.of(OkabeIto.BLUE, OkabeIto.VERMILLION, OkabeIto.BLUISH_GREEN, OkabeIto.REDDISH_PURPLE);
 
     private NuReChart() {}
 
     /** The chart; the chosen run, if it is among the points, is ringed. */
     public static JFreeChart of(NuRe numbers, Optional<String> chosenRun, ChartLook look) {
-        LogAxis re = axis("Reynolds number Re_L", look, points(numbers).flatMapToDouble(p -> ends(p.re(), p.reU())));
-        LogAxis nu = axis(
+        ValueAxis re = axis("Reynolds number Re_L", look, points(numbers).flatMapToDouble(p -> ends(p.re(), p.reU())));
+        ValueAxis nu = axis(
                 "Nusselt number Nu_L",
                 look,
                 points(numbers)
@@ -139,14 +138,14 @@ public final class NuReChart {
     }
 
     private static Color hue(int group, ChartLook look) {
-        return look.of(GROUP_HUES.get(group % GROUP_HUES.size()));
+        return look.of(Palette.series(group));
     }
 
     private static Stream<Point> points(NuRe numbers) {
         return numbers.groups().stream().flatMap(group -> group.points().stream());
     }
 
-    private static LogAxis axis(String title, ChartLook look, DoubleStream values) {
+    private static ValueAxis axis(String title, ChartLook look, DoubleStream values) {
         double[] all = values.filter(v -> v > 0.0).toArray();
         double low = DoubleStream.of(all).min().orElse(1.0);
         double high = DoubleStream.of(all).max().orElse(10.0);

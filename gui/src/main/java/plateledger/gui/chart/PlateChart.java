@@ -1,10 +1,8 @@
 package plateledger.gui.chart;
 
 import java.awt.Color;
-import java.util.EnumMap;
 import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Set;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.NumberAxis;
@@ -26,6 +24,8 @@ import plateledger.gui.model.NumberText;
 import plateledger.gui.model.PlateProfile;
 import plateledger.gui.model.PlateProfile.Station;
 import plateledger.gui.model.PlateSection.Strip;
+import plateledger.reduce.LedgerTerm;
+import plateledger.report.Palette;
 
 /** One run along the plate: temperatures above, the plate in section, booked heat below, on one x axis. */
 public final class PlateChart {
@@ -81,7 +81,7 @@ public final class PlateChart {
 
         XYIntervalSeries surface = new XYIntervalSeries("surface measured, 95 %");
         stations.forEach(s -> add(surface, s.xMm(), s.surfaceC(), s.surfaceU()));
-        XYErrorRenderer surfaceMarks = marks(0, 6.0, look.of(OkabeIto.VERMILLION), look);
+        XYErrorRenderer surfaceMarks = marks(0, 6.0, look.of(Palette.WINE), look);
         surfaceMarks.setDefaultToolTipGenerator((data, series, item) -> at(stations.get(item)) + "T_s "
                 + NumberText.withInterval(
                         stations.get(item).surfaceC(), stations.get(item).surfaceU()) + " °C");
@@ -151,13 +151,11 @@ public final class PlateChart {
         bars.setBarPainter(new StandardXYBarPainter());
         bars.setShadowVisible(false);
         bars.setDrawBarOutline(true);
-        Map<HeatPart, OkabeIto> hues = hues();
-        Map<HeatPart, Hatch> hatches = hatches();
         List<HeatPart> parts = List.of(HeatPart.values());
         for (int series = 0; series < parts.size(); series++) {
             HeatPart part = parts.get(series);
-            Color colour = look.of(require(hues, part));
-            bars.setSeriesPaint(series, require(hatches, part).fill(colour, look.ground()));
+            Color colour = look.of(hue(part));
+            bars.setSeriesPaint(series, hatch(part).fill(colour, look.ground()));
             bars.setSeriesOutlinePaint(series, look.thinned(0.7));
         }
         bars.setDefaultToolTipGenerator((data, series, item) -> {
@@ -169,26 +167,22 @@ public final class PlateChart {
         return bars;
     }
 
-    private static Map<HeatPart, OkabeIto> hues() {
-        Map<HeatPart, OkabeIto> hues = new EnumMap<>(HeatPart.class);
-        hues.put(HeatPart.CONVECTION, OkabeIto.BLUE);
-        hues.put(HeatPart.RADIATION, OkabeIto.ORANGE);
-        hues.put(HeatPart.BACK, OkabeIto.BLUISH_GREEN);
-        hues.put(HeatPart.CONDUCTION, OkabeIto.REDDISH_PURPLE);
-        return hues;
+    private static Color hue(HeatPart part) {
+        return switch (part) {
+            case CONVECTION -> Palette.of(LedgerTerm.CONVECTION);
+            case RADIATION -> Palette.of(LedgerTerm.RADIATION);
+            case BACK -> Palette.of(LedgerTerm.BACK);
+            case CONDUCTION -> Palette.of(LedgerTerm.NOSE);
+        };
     }
 
-    private static Map<HeatPart, Hatch> hatches() {
-        Map<HeatPart, Hatch> hatches = new EnumMap<>(HeatPart.class);
-        hatches.put(HeatPart.CONVECTION, Hatch.SOLID);
-        hatches.put(HeatPart.RADIATION, Hatch.RISING);
-        hatches.put(HeatPart.BACK, Hatch.DOTS);
-        hatches.put(HeatPart.CONDUCTION, Hatch.LEVEL);
-        return hatches;
-    }
-
-    private static <V> V require(Map<HeatPart, V> map, HeatPart part) {
-        return java.util.Objects.requireNonNull(map.get(part), part.label());
+    private static Hatch hatch(HeatPart part) {
+        return switch (part) {
+            case CONVECTION -> Hatch.SOLID;
+            case RADIATION -> Hatch.RISING;
+            case BACK -> Hatch.DOTS;
+            case CONDUCTION -> Hatch.LEVEL;
+        };
     }
 
     /** A level line over each strip that has a station. */

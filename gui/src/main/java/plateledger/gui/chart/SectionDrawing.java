@@ -20,6 +20,7 @@ import plateledger.gui.model.PlateSection.Junction;
 import plateledger.gui.model.PlateSection.Layer;
 import plateledger.gui.model.PlateSection.LayerKind;
 import plateledger.gui.model.PlateSection.Strip;
+import plateledger.report.Palette;
 
 /**
  * The plate in cross-section, to the scale of the x axis along the flow. Layers too thin to be seen at that scale are drawn
@@ -154,7 +155,7 @@ final class SectionDrawing extends AbstractXYAnnotation {
                 double from = toX.applyAsDouble(strip.fromMm()) + 1.0;
                 double to = toX.applyAsDouble(strip.toMm()) - 1.0;
                 Rectangle2D box = new Rectangle2D.Double(from, y, to - from, STRIP_HEIGHT);
-                g.setPaint(look.of(OkabeIto.VERMILLION));
+                g.setPaint(look.of(Palette.WINE));
                 g.fill(box);
                 tip(
                         box,

@@ -10,7 +10,7 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
 import javax.swing.Icon;
 import plateledger.finding.Level;
-import plateledger.gui.chart.OkabeIto;
+import plateledger.report.Palette;
 
 /** The shape of a finding's level: an octagon, a triangle, a disc, an open ring. The colour only supports the shape. */
 public record LevelIcon(Level level, int size) implements Icon {
@@ -34,22 +34,13 @@ public record LevelIcon(Level level, int size) implements Icon {
         g.translate(x + size / 2.0, y + size / 2.0);
         Shape shape = shape();
         if (level != Level.NOT_CHECKED) {
-            g.setColor(hue().color());
+            g.setColor(Palette.of(level));
             g.fill(shape);
         }
         g.setColor(on.getForeground());
         g.setStroke(new BasicStroke(1.2f));
         g.draw(shape);
         g.dispose();
-    }
-
-    private OkabeIto hue() {
-        return switch (level) {
-            case STOP -> OkabeIto.VERMILLION;
-            case CAUTION -> OkabeIto.YELLOW;
-            case NOTE -> OkabeIto.SKY_BLUE;
-            case NOT_CHECKED -> OkabeIto.BLACK;
-        };
     }
 
     private Shape shape() {
