@@ -6,7 +6,9 @@ import plateledger.log.Series;
 /**
  * The Hampel identifier: a value is a spike if it differs from the median of its window by more than t₀ · 1.4826 · MAD.
  * Window ±10 samples and t₀ = 5 flag about 0.07 % of white Gaussian noise. The MAD is floored at half a step of the
- * reading, else quantised signals would flag every change. A flagged stretch longer than half a window is a step, no spike.
+ * reading, else quantised signals would flag every change, and at the channel's own median MAD, since the MAD of 21 values
+ * is now and then small by chance: that alone would flag a dozen good readings in a day. A flagged stretch longer than half a window is a step, no spike, and so
+ * is one that lies between the levels before and after it.
  * (Hampel, J. Am. Stat. Assoc. 69 (1974) 383, from memory; window and limit are common practice.)
  */
 final class Hampel {
@@ -44,7 +46,7 @@ final class Hampel {
             while (end < n && flagged[end]) {
                 end++;
             }
-            if (end - i <= HALF_WINDOW) {
+            if (end > i && end - i <= HALF_WINDOW && !isEdge(x, i, end)) {
                 for (int j = i; j < end; j++) {
                     spikes[count++] = at[j];
                 }
@@ -52,6 +54,30 @@ final class Hampel {
             i = Math.max(end, i + 1);
         }
         return Arrays.copyOf(spikes, count);
+    }
+
+    /**
+     * True if the stretch leads from the level before it to the level after it (a supply switched on), or stands at an end of
+     * the log, where a spike cannot be told from a step.
+     */
+    private static boolean isEdge(double[] x, int from, int to) {
+        if (from == 0 || to == x.length) {
+            return true;
+        }
+        double before = middle(x, Math.max(0, from - 3), from);
+        double after = middle(x, to, Math.min(x.length, to + 3));
+        for (int i = from; i < to; i++) {
+            if (x[i] < Math.min(before, after) || x[i] > Math.max(before, after)) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static double middle(double[] x, int from, int to) {
+        double[] part = Arrays.copyOfRange(x, from, to);
+        Arrays.sort(part);
+        return part[part.length / 2];
     }
 
     /** Walks a sorted window along the values: one value leaves, one enters, the median is read off. */
@@ -66,7 +92,8 @@ final class Hampel {
         for (int i = 0; i < HALF_WINDOW; i++) {
             size = insert(sorted, size, x[i]);
         }
-        double floor = LIMIT * MAD_TO_SIGMA * step / 2.0;
+        double[] medians = new double[n];
+        double[] mads = new double[n];
         for (int i = 0; i < n; i++) {
             if (i > HALF_WINDOW) {
                 size = remove(sorted, size, x[i - HALF_WINDOW - 1]);
@@ -75,8 +102,14 @@ final class Hampel {
                 size = insert(sorted, size, x[i + HALF_WINDOW]);
             }
             double median = size % 2 == 1 ? sorted[size / 2] : (sorted[size / 2 - 1] + sorted[size / 2]) / 2.0;
-            double off = Math.abs(x[i] - median);
-            flagged[i] = off > floor && off > LIMIT * MAD_TO_SIGMA * mad(sorted, size, median);
+            medians[i] = median;
+            mads[i] = mad(sorted, size, median);
+        }
+        double[] ascending = mads.clone();
+        Arrays.sort(ascending);
+        double floor = Math.max(step / 2.0, ascending[n / 2]);
+        for (int i = 0; i < n; i++) {
+            flagged[i] = Math.abs(x[i] - medians[i]) > LIMIT * MAD_TO_SIGMA * Math.max(floor, mads[i]);
         }
         return flagged;
     }

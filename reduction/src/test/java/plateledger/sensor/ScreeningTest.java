@@ -195,6 +195,9 @@ final class ScreeningTest {
         double[] step = quantised(400, 0.001, 8, i -> i < 200 ? 0.0 : 12.0, 0.002);
         Instrument voltmeter = instrument(SignalKind.VOLTAGE, 0.001, -1.0, 60.0);
         assertEquals(List.of(), ids(Screening.screen(series("V1", "V", step), voltmeter)));
+        step[199] = 3.7; // a reading on the flank
+        step[200] = 8.9;
+        assertEquals(List.of(), ids(Screening.screen(series("V1", "V", step), voltmeter)));
         double[] v = quantised(400, 0.001, 9, i -> 12.0, 0.002);
         v[100] = 99.0;
         v[101] = 15.0;
