@@ -79,7 +79,7 @@ public record RunPlan(
     /** Place of the trip wire, m from the leading edge. */
     public static final double TRIP_M = 0.050;
 
-    /** Time after the start at which a run ends being worth anything for averages: its last quarter of an hour. */
+    /** Length of the window at the end of a run over which the truth is averaged, s. */
     public static final double TRUTH_WINDOW_S = 900.0;
 
     /** Sampling interval of the plate and power loggers, s. */

@@ -7,7 +7,11 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 
-/** Writes the demo campaign folder. */
+/**
+ * Writes the demo campaign folder; from the top of the repository, after {@code mvn -q -DskipTests package}:
+ *
+ * <pre>java -cp rig-data-demo/target/classes:reduction/target/classes plateledger.demo.app.WriteCampaign</pre>
+ */
 public final class WriteCampaign {
     private final SimulatedCampaign.Drawn drawn;
 

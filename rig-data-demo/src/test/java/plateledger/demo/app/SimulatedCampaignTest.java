@@ -87,7 +87,8 @@ final class SimulatedCampaignTest {
             // What does not go into storage; a short run's foam still takes some thousandths of the power.
             double steady =
                     run.truth().books().electrical() - run.truth().books().storage();
-            // The two paths also use grids of their own, which differ by up to a thousandth (test below).
+            // The two paths also use grids of their own, which differ by up to two thousandths in a loss run (test
+            // below).
             double share = run.plan().kind() == Kind.LOSS ? 0.002 : 0.005;
             assertEquals(steady, power - books.storage(), share * power, id);
             assertEquals(0.0, history.truth().books().residual(), 1e-6 * power, id);
@@ -103,15 +104,17 @@ final class SimulatedCampaignTest {
             RunTruth normal = truth(exact, id, PlateGrid.Fineness.NORMAL);
             RunTruth fine = truth(exact, id, PlateGrid.Fineness.FINE);
             double power = fine.books().electrical();
-            assertEquals(fine.books().convection(), normal.books().convection(), 3e-4 * power, id);
-            assertEquals(fine.books().convection(), fast.books().convection(), 1e-3 * power, id);
+            assertEquals(power, normal.books().electrical(), 1e-3 * power, id);
+            assertEquals(power, fast.books().electrical(), 2e-3 * power, id);
+            assertEquals(fine.books().convection(), normal.books().convection(), 1e-4 * power, id);
+            assertEquals(fine.books().convection(), fast.books().convection(), 2e-4 * power, id);
             if (!fine.stations().isEmpty()) {
-                assertEquals(fine.nusselt(), normal.nusselt(), 5e-4 * fine.nusselt(), id);
-                assertEquals(fine.nusselt(), fast.nusselt(), 1.5e-3 * fine.nusselt(), id);
+                assertEquals(fine.nusselt(), normal.nusselt(), 2e-4 * fine.nusselt(), id);
+                assertEquals(fine.nusselt(), fast.nusselt(), 4e-4 * fine.nusselt(), id);
                 for (int s = 0; s < fine.stations().size(); s++) {
                     double t = fine.stations().get(s).faceK();
-                    assertEquals(t, normal.stations().get(s).faceK(), 0.01, id + " station " + s);
-                    assertEquals(t, fast.stations().get(s).faceK(), 0.04, id + " station " + s);
+                    assertEquals(t, normal.stations().get(s).faceK(), 0.005, id + " station " + s);
+                    assertEquals(t, fast.stations().get(s).faceK(), 0.012, id + " station " + s);
                 }
             }
         }
