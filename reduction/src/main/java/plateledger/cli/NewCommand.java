@@ -14,6 +14,7 @@ import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
+import plateledger.campaign.Skeleton;
 import plateledger.finding.Finding;
 import plateledger.finding.Level;
 import plateledger.finding.Place;
@@ -54,15 +55,15 @@ final class NewCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         try {
-            List<Skeleton.Logged> read = new ArrayList<>();
+            List<LogData> read = new ArrayList<>();
             for (Path log : logs) {
                 read.add(read(log));
             }
-            Map<String, String> files = new Skeleton(folderName(), read).files();
+            Map<String, String> files = Skeleton.files(read);
             write(files);
             terminal.out()
                     .println("Wrote " + folder.resolve("campaign.toml") + ", rig.toml, instruments.toml and the"
-                            + " folder logs. Every value in them is an example: put yours in its place.");
+                            + " folder logs. Lines that say \"replace\" hold invented values: put yours there.");
             terminal.out().println("Then: plateledger check " + folder);
             terminal.out().flush();
             return ExitStatus.DONE;
@@ -73,20 +74,14 @@ final class NewCommand implements Callable<Integer> {
         }
     }
 
-    private String folderName() {
-        Path name = folder.toAbsolutePath().normalize().getFileName();
-        return name == null ? "campaign" : name.toString();
-    }
-
-    private static Skeleton.Logged read(Path log) throws RefusedException {
+    private static LogData read(Path log) throws RefusedException {
         Path absolute = log.toAbsolutePath().normalize();
         Path parent = absolute.getParent();
         Path name = absolute.getFileName();
         if (parent == null || name == null) {
             throw refused(log.toString(), "a folder", "a log file", "Name a file.");
         }
-        LogData data = LogReader.read(parent, name.toString(), Optional.empty(), ZoneOffset.UTC, Map.of());
-        return new Skeleton.Logged(Skeleton.loggerName(name.toString()), data);
+        return LogReader.read(parent, name.toString(), Optional.empty(), ZoneOffset.UTC, Map.of());
     }
 
     private void write(Map<String, String> files) throws RefusedException {

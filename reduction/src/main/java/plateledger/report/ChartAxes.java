@@ -26,10 +26,13 @@ public final class ChartAxes {
      */
     public static NumberAxis linear(String label) {
         NumberAxis axis = new NumberAxis(label);
-        DecimalFormat format = new DecimalFormat("0.########", DecimalFormatSymbols.getInstance(Locale.ROOT));
+        DecimalFormatSymbols symbols = DecimalFormatSymbols.getInstance(Locale.ROOT);
+        symbols.setMinusSign('−');
+        DecimalFormat format = new DecimalFormat("0.########", symbols);
         axis.setStandardTickUnits(new NumberTickUnitSource(false, format));
         axis.setAutoRangeIncludesZero(false);
         dress(axis);
+        axis.setMinorTickMarksVisible(false);
         return axis;
     }
 

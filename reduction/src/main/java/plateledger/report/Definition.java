@@ -6,7 +6,6 @@ import java.util.Locale;
 import java.util.Map;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.Definitions;
-import plateledger.quantity.Estimate;
 import plateledger.quantity.Stated;
 import plateledger.rig.Plate;
 import plateledger.rig.Rig;
@@ -77,9 +76,9 @@ final class Definition {
                     plate.orientation().name().toLowerCase(Locale.ROOT).replace('_', ' '),
                     mm(plate.heatedStartM()) + " to " + mm(plate.heatedEndM()),
                     mm(plate.widthM()),
-                    mm(plate.sheet().thicknessM()) + " mm " + plate.sheet().material(),
-                    mm(plate.coat().thicknessM()) + " mm " + plate.coat().material(),
-                    mm(plate.foam().thicknessM()) + " mm " + plate.foam().material(),
+                    mm(plate.sheet().thicknessM()) + "\u00a0mm " + plate.sheet().material(),
+                    mm(plate.coat().thicknessM()) + "\u00a0mm " + plate.coat().material(),
+                    mm(plate.foam().thicknessM()) + "\u00a0mm " + plate.foam().material(),
                     Shown.pm(plate.emissivity().estimate()),
                     String.valueOf(plate.heaters().size()),
                     String.valueOf(plate.thermocouples().size()));
@@ -88,7 +87,6 @@ final class Definition {
     }
 
     private static String mm(Stated metres) {
-        Estimate e = Shown.times(metres.estimate(), 1000.0);
-        return Shown.value(e);
+        return Shown.value(Shown.times(metres.estimate(), 1000.0));
     }
 }

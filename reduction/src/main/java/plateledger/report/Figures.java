@@ -50,6 +50,7 @@ final class Figures {
             return Optional.empty();
         }
         Plot plot = new Plot(ChartAxes.logarithmic("Re"), ChartAxes.logarithmic("Nu"));
+        boolean theoryNamed = false;
         for (int i = 0; i < groups.size(); i++) {
             RunGroup group = groups.get(i);
             Color colour = Palette.series(i);
@@ -58,10 +59,11 @@ final class Figures {
                             p.values().reL().value(), p.values().nuLTheory().value()))
                     .toList();
             if (theory.size() > 1) {
-                plot.curve("theory for this rig, " + group.regime().word(), Palette.INK, true, theory);
+                plot.curve("theory for this rig", Palette.INK, true, !theoryNamed, theory);
+                theoryNamed = true;
             }
             for (FitResult fit : group.fits(result)) {
-                plot.curve("fit " + fit.problem().id() + " with 95 % band", colour, false, fitted(fit));
+                plot.curve(fit.problem().id(), colour, false, false, fitted(fit));
             }
         }
         for (int i = 0; i < groups.size(); i++) {
@@ -95,9 +97,10 @@ final class Figures {
                 continue;
             }
             plot.curve(
-                    "95 % of the theory itself, " + group.regime().word(),
+                    group.regime().word(),
                     Palette.series(i),
                     true,
+                    false,
                     group.compared().stream()
                             .map(p -> {
                                 double u = 100.0
@@ -164,7 +167,7 @@ final class Figures {
                 .map(p -> new Plot.CurvePoint(
                         p.x(), 100.0 * (p.low() / p.y() - 1.0), 0.0, 100.0 * (p.high() / p.y() - 1.0)))
                 .toList();
-        plot.curve("95 % band of the fit", Palette.TEAL, true, band);
+        plot.curve("band", Palette.TEAL, true, false, band);
         List<Plot.Mark> marks = new ArrayList<>();
         List<FitPoint> points = fit.problem().points();
         for (int i = 0; i < points.size(); i++) {
@@ -177,7 +180,7 @@ final class Figures {
         plot.marks("runs, 95 % of the random parts", Palette.INDIGO, 0, marks);
         String caption =
                 "Residuals of fit " + fit.problem().id() + ". Bars hold the parts that are drawn anew in each run;"
-                        + " the band also holds what all runs share.";
+                        + " the shaded 95 % band of the fit also holds what runs share.";
         return draw("residuals-" + fileName(fit.problem().id()), caption, plot, LOW);
     }
 

@@ -21,7 +21,6 @@ final class OneTwoFiveAxis extends LogAxis {
     private static final int FEWEST_LABELS = 3;
     private static final int FINE_STEPS = 20; // of a decade's first figure, where even 1 to 9 gives too few labels
     private static final int LONGEST_PLAIN = 5; // digits of a number written without a power of ten
-    private static final String[] RAISED = {"⁰", "¹", "²", "³", "⁴", "⁵", "⁶", "⁷", "⁸", "⁹"};
 
     OneTwoFiveAxis(String label) {
         super(label);
@@ -89,14 +88,8 @@ final class OneTwoFiveAxis extends LogAxis {
         if (exponent >= -3 && exponent < LONGEST_PLAIN) {
             return exact.toPlainString();
         }
-        StringBuilder power = new StringBuilder("10");
-        if (exponent < 0) {
-            power.append('⁻');
-        }
-        for (char digit : String.valueOf(Math.abs(exponent)).toCharArray()) {
-            power.append(RAISED[digit - '0']);
-        }
+        String power = Shown.powerOfTen(exponent);
         BigDecimal figure = exact.movePointLeft(exponent).stripTrailingZeros();
-        return figure.compareTo(BigDecimal.ONE) == 0 ? power.toString() : figure.toPlainString() + "·" + power;
+        return figure.compareTo(BigDecimal.ONE) == 0 ? power : figure.toPlainString() + "·" + power;
     }
 }

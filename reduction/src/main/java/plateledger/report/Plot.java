@@ -71,7 +71,7 @@ final class Plot {
     }
 
     /** A curve with a band. */
-    Plot curve(String label, Color colour, boolean dashed, List<CurvePoint> points) {
+    Plot curve(String label, Color colour, boolean dashed, boolean inLegend, List<CurvePoint> points) {
         YIntervalSeries series = new YIntervalSeries(label, false, true);
         points.forEach(p -> series.add(p.x, p.y, p.low, p.high));
         YIntervalSeriesCollection data = new YIntervalSeriesCollection();
@@ -80,6 +80,7 @@ final class Plot {
         renderer.setSeriesPaint(0, colour);
         renderer.setSeriesFillPaint(0, new Color(colour.getRed(), colour.getGreen(), colour.getBlue(), 255));
         renderer.setAlpha(BAND_ALPHA / 255f);
+        renderer.setSeriesVisibleInLegend(0, inLegend);
         renderer.setSeriesStroke(
                 0,
                 dashed

@@ -28,6 +28,9 @@ import plateledger.reduce.RunState;
 final class ReportPage {
     private static final Map<String, String> TITLE_FIELDS = titleFields();
 
+    /** Findings of one kind and level that are shown in full; a stop always is. */
+    private static final int SHOWN_OF_A_KIND = 6;
+
     private final CampaignResult result;
     private final AuditRecord audit;
     private final List<Figures.Figure> figures;
@@ -241,8 +244,12 @@ final class ReportPage {
         List<Map<String, Object>> levels = new ArrayList<>();
         for (Level level : Level.values()) {
             List<Map<String, Object>> items = new ArrayList<>();
+            Map<String, Integer> kinds = new java.util.TreeMap<>();
             for (Finding f : result.findings()) {
-                if (f.level() == level) {
+                if (f.level() != level) {
+                    continue;
+                }
+                if (kinds.merge(f.id(), 1, Integer::sum) <= SHOWN_OF_A_KIND || level == Level.STOP) {
                     items.add(Map.of(
                             "id", f.id(),
                             "subject", f.subject(),
@@ -253,7 +260,17 @@ final class ReportPage {
                             "source", f.source()));
                 }
             }
+            List<String> folded = new ArrayList<>();
+            kinds.forEach((id, n) -> {
+                if (n > SHOWN_OF_A_KIND && level != Level.STOP) {
+                    folded.add((n - SHOWN_OF_A_KIND) + " more of " + id + " in findings.csv");
+                }
+            });
             levels.add(Map.of(
+                    "folded",
+                    folded,
+                    "count",
+                    kinds.values().stream().mapToInt(Integer::intValue).sum(),
                     "word",
                     level.word(),
                     "mark",

@@ -11,6 +11,7 @@ import java.util.stream.Collectors;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.Logger;
 import plateledger.campaign.Run;
+import plateledger.campaign.RunType;
 import plateledger.log.LogData;
 import plateledger.log.Series;
 import plateledger.quantity.Estimate;
@@ -41,15 +42,16 @@ final class RunSections {
                 "state");
         for (RunResult r : result.runs()) {
             Run run = r.run();
+            boolean heated = run.type() == RunType.HEATED;
             grid.row(
                     run.id(),
                     run.type().word(),
                     run.day(),
                     run.plate(),
-                    run.plate().isEmpty() ? "" : run.regime().word(),
+                    heated ? run.regime().word() : "",
                     Double.isFinite(run.speedSetMPerS()) ? Shown.digits(run.speedSetMPerS(), 3) : "",
                     Double.isFinite(run.powerSetW()) ? Shown.digits(run.powerSetW(), 3) : "",
-                    run.set(),
+                    heated ? run.set() : "",
                     run.trip()
                             .map(t -> Shown.digits(1000 * t.wireM(), 3) + " mm wire at "
                                     + Shown.digits(1000 * t.xM(), 3) + " mm")

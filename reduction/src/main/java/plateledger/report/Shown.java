@@ -18,6 +18,9 @@ final class Shown {
 
     private static final double CELSIUS_ZERO_K = 273.15; // exact, SI Brochure 9th ed.
     private static final String NARROW_SPACE = "\u202f";
+    private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+    private static final int HIGHEST_PLAIN = 7; // powers of ten from here on
+    private static final int LOWEST_PLAIN = -4; // and below here
     private static final int GROUPED_FROM = 5; // digits before the point
     private static final DateTimeFormatter MINUTE = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm", Locale.ROOT);
     private static final DateTimeFormatter CLOCK = DateTimeFormatter.ofPattern("HH:mm:ss", Locale.ROOT);
@@ -59,15 +62,28 @@ final class Shown {
         }
         BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_EVEN));
         int exponent = rounded.precision() - rounded.scale() - 1;
-        if (exponent >= 7 || exponent < -4) {
-            return rounded.movePointLeft(exponent).toPlainString() + "·10^" + exponent;
+        int missing = digits - rounded.precision(); // 0.01 to two digits is written 0.010
+        BigDecimal padded = missing > 0 ? rounded.setScale(rounded.scale() + missing) : rounded;
+        if (exponent >= HIGHEST_PLAIN || exponent < LOWEST_PLAIN) {
+            return grouped(padded.movePointLeft(exponent).toPlainString()) + "·" + powerOfTen(exponent);
         }
-        return grouped(rounded.toPlainString());
+        return grouped(padded.toPlainString());
+    }
+
+    /** 10 raised to a whole number, e.g. {@code 10⁻⁶}. */
+    static String powerOfTen(int exponent) {
+        StringBuilder power = new StringBuilder(exponent < 0 ? "10⁻" : "10");
+        for (char digit : String.valueOf(Math.abs(exponent)).toCharArray()) {
+            power.append(RAISED.charAt(digit - '0'));
+        }
+        return power.toString();
     }
 
     /** A number with so many decimals. */
     static String fixed(double value, int decimals) {
-        return Double.isFinite(value) ? String.format(Locale.ROOT, "%." + decimals + "f", value) : NONE;
+        return Double.isFinite(value)
+                ? String.format(Locale.ROOT, "%." + decimals + "f", value).replace('-', '−')
+                : NONE;
     }
 
     /** A number with its sign and so many decimals, e.g. {@code +1.3}. */
