@@ -24,6 +24,14 @@ public final class PlateScales {
                 total);
     }
 
+    /** Radiation conductance of the heated area to the walls at a temperature, W/K, METHODS.md eq. (L-2) made linear. */
+    public static double radiationConductanceWPerK(Plate plate, double exchangeFactor, double temperatureK) {
+        double area = (plate.heatedEndM().value() - plate.heatedStartM().value())
+                * plate.widthM().value();
+        return area
+                * LossTerm.Radiation.slope(exchangeFactor, plate.emissivity().value(), temperatureK);
+    }
+
     /** Heat capacity of the heated area that moves with the sheet, J/K, METHODS.md eq. (L-7). */
     public static double heatCapacityJPerK(Plate plate) {
         double area = (plate.heatedEndM().value() - plate.heatedStartM().value())

@@ -107,6 +107,10 @@ final class PlateSolver {
         private final double[] right = new double[k];
         private final double[] row = new double[k];
         private final SheetInputs sheet;
+        private double noseG;
+        private double tailG;
+        private double noseK;
+        private double tailK;
 
         Pass(double[] in, double adiabaticWallK, PlateState state) {
             this.in = in;
@@ -117,8 +121,30 @@ final class PlateSolver {
             for (int f = 1; f < n; f++) {
                 link[f] = sheet.sheetWPerK / (0.5 * (dx[f - 1] + dx[f]));
             }
-            link[0] = end(sheet.noseWPerK, dx[0]);
-            link[n] = end(sheet.tailWPerK, dx[n - 1]);
+        }
+
+        /**
+         * The ends lose heat at the span's mean temperature, which the edges lower by a share of (T₁ − T_frame): for the
+         * one-dimensional sheet that is a smaller conductance to a neighbour moved away from the frame's temperature.
+         */
+        private void linkEnds() {
+            double up = endShare(0);
+            double down = endShare(n - 1);
+            noseG = sheet.noseWPerK * (1.0 - up);
+            tailG = sheet.tailWPerK * (1.0 - down);
+            noseK = (sheet.noseK - up * sheet.frameK) / (1.0 - up);
+            tailK = (sheet.tailK - down * sheet.frameK) / (1.0 - down);
+            link[0] = end(noseG, sheet.dx[0]);
+            link[n] = end(tailG, sheet.dx[n - 1]);
+        }
+
+        private double endShare(int cell) {
+            if (!(s.surfaceSlope[cell] > 0.0)) {
+                return 0.0;
+            }
+            double l = SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.backWPerM2K);
+            return SpanProfile.edgeShare(sheet.edgeWPerMK, sheet.sheetWPerK, l, sheet.widthM)
+                    * SpanProfile.meanShape(l, sheet.widthM);
         }
 
         /** Conductance per span from the centre of an end cell to the neighbour beyond the end, W/(m K). */
@@ -129,6 +155,7 @@ final class PlateSolver {
 
         /** One pass; returns the largest change of a sheet temperature, K. */
         double advance(boolean fit) {
+            linkEnds();
             double[] dx = sheet.dx;
             double resistance = sheet.faceM2KPerW;
             java.util.Arrays.fill(rows, 0.0);
@@ -145,8 +172,8 @@ final class PlateSolver {
                 s.h[i] = h;
                 s.qSurface[i] = q;
                 s.surfaceSlope[i] = slope;
-                double below = i > 0 ? s.sheetK[i - 1] : sheet.noseK;
-                double above = i < n - 1 ? s.sheetK[i + 1] : sheet.tailK;
+                double below = i > 0 ? s.sheetK[i - 1] : noseK;
+                double above = i < n - 1 ? s.sheetK[i + 1] : tailK;
                 double t = s.sheetK[i];
                 int row = i * across;
                 rows[row + k] = link[i] * (below - t)
@@ -312,8 +339,8 @@ final class PlateSolver {
                 double at = t - e * (t - sheet.frameK);
                 s.junctionK[p] = at - in[layout.stem(p)] * (at - sheet.plenumK);
             }
-            s.endUpK = outer(s.sheetK[0], link[0], sheet.noseWPerK, sheet.noseK);
-            s.endDownK = outer(s.sheetK[n - 1], link[n], sheet.tailWPerK, sheet.tailK);
+            s.endUpK = outer(s.sheetK[0], link[0], noseG, noseK);
+            s.endDownK = outer(s.sheetK[n - 1], link[n], tailG, tailK);
         }
 
         private double outer(double cellK, double linkWPerMK, double conductanceWPerK, double neighbourK) {

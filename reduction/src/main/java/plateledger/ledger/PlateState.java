@@ -27,5 +27,6 @@ final class PlateState {
         System.arraycopy(other.rho, 0, rho, 0, rho.length);
         System.arraycopy(other.sheetK, 0, sheetK, 0, sheetK.length);
         System.arraycopy(other.surfaceK, 0, surfaceK, 0, surfaceK.length);
+        System.arraycopy(other.surfaceSlope, 0, surfaceSlope, 0, surfaceSlope.length);
     }
 }

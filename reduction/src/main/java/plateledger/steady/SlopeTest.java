@@ -13,6 +13,18 @@ package plateledger.steady;
  * @param tau samples per independent residual, at least 1
  */
 public record SlopeTest(double slope, double standardError, double dof, double tau) {
+    /** No slope at all, known exactly. */
+    static final SlopeTest NONE = new SlopeTest(0.0, 0.0, Double.POSITIVE_INFINITY, 1.0);
+
+    /** This slope less another, their errors taken as independent; the smaller dof. */
+    SlopeTest against(SlopeTest other) {
+        return new SlopeTest(
+                slope - other.slope,
+                Math.hypot(standardError, other.standardError),
+                Math.min(dof, other.dof),
+                tau);
+    }
+
 
     /**
      * Fits a line.

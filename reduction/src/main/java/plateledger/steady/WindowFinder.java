@@ -19,7 +19,8 @@ import plateledger.log.Series;
  *   <li><b>storage</b>: C (|b| + t₀.₉₇₅ SE_b) ÷ P of the plate's mean temperature stays below the limit, an upper bound, so
  *       that a short noisy window cannot pass by ignorance; without power the plate's drift bound over the window must be
  *       harmless instead;
- *   <li><b>drift</b>: of each channel, the power included: the drift bound over the window is below half the channel's
+ *   <li><b>drift</b>: of each channel, the power included (channels that follow the room are judged against the stream's
+ *       own drift, which means of one window share): the drift bound over the window is below half the channel's
  *       target uncertainty, or no drift can be told (5 % false alarms over all channels of a window together);
  *   <li><b>march</b>: five sub-means do not move strictly one way by more than two standard errors of a sub-mean, unless the
  *       whole way is harmless as above (slow drift of the room moves every channel, and means follow it);

@@ -22,6 +22,9 @@ import plateledger.log.Series;
  *     harmless drift: it passes only if no drift can be told
  * @param resolution one step of a channel's reading, SI; for a channel not listed the smallest change seen
  * @param declared a window chosen by a person; it wins over any search
+ * @param common a channel whose slow drift all {@code followers} share (the stream's temperature); its drift is no sign of
+ *     unsteadiness, since means of one window follow it together
+ * @param followers channels judged by their drift against {@code common}
  */
 public record WindowRequest(
         Map<String, Series> channels,
@@ -32,7 +35,9 @@ public record WindowRequest(
         double minimumS,
         Map<String, Double> targetUncertainty,
         Map<String, Double> resolution,
-        Optional<Declared> declared) {
+        Optional<Declared> declared,
+        Optional<String> common,
+        Set<String> followers) {
 
     /**
      * A window chosen by a person.
@@ -49,6 +54,7 @@ public record WindowRequest(
         temperatureChannels = Collections.unmodifiableSet(new TreeSet<>(temperatureChannels));
         targetUncertainty = Map.copyOf(targetUncertainty);
         resolution = Map.copyOf(resolution);
+        followers = Set.copyOf(followers);
         if (!channels.keySet().containsAll(temperatureChannels)) {
             throw new IllegalArgumentException("temperature channels without a series: " + temperatureChannels);
         }

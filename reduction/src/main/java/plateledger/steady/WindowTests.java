@@ -27,6 +27,8 @@ final class WindowTests {
     /** Slopes fitted so far: a window that passes is asked for its evidence and its means after that. */
     private final Map<Stretch, SlopeTest> slopes = new HashMap<>();
 
+    private final Optional<ChannelSamples> common;
+
     private record Stretch(String channel, int from, int to) {}
 
     /**
@@ -48,6 +50,8 @@ final class WindowTests {
         this.plateWeights = plateWeights.clone();
         this.power = power;
         this.order = new ArrayList<>(channels);
+        this.common = request.common()
+                .flatMap(name -> channels.stream().filter(c -> c.name().equals(name)).findFirst());
     }
 
     /** True if a stretch (times from the origin) passes every test. */
@@ -126,7 +130,7 @@ final class WindowTests {
             double watts = mean(power.get(), start, end);
             return watts > 0.0 ? request.shareLimit() * watts / request.heatCapacityJPerK() : 0.0;
         }
-        return HARMLESS * plateTarget() / (end - start);
+        return common.isPresent() ? Double.POSITIVE_INFINITY : HARMLESS * plateTarget() / (end - start);
     }
 
     /** Target of the plate's mean temperature: that of its best channel. */
@@ -160,8 +164,36 @@ final class WindowTests {
             return new Evidence("storage", "plate", share, request.shareLimit(), "1", share <= request.shareLimit());
         }
         double allowed = plate.isEmpty() ? 0.0 : HARMLESS * plateTarget();
-        double travel = bound * (end - start);
+        double travel = plate.isEmpty() ? 0.0 : plateTravel(start, end);
         return new Evidence("plate drift", "plate", travel, allowed, "K", travel <= allowed);
+    }
+
+    /** Bound of the plate's own drift over a stretch, beyond what it shares with the room, K. */
+    private double plateTravel(double start, double end) {
+        double bound = 0.0;
+        for (int i = 0; i < plate.size(); i++) {
+            ChannelSamples c = plate.get(i);
+            int a = c.from(start);
+            int b = c.to(end);
+            bound += b - a < FEWEST
+                    ? Double.POSITIVE_INFINITY
+                    : plateWeights[i]
+                            * SlopeTest.of(c.times(a, b), c.values(a, b))
+                                    .against(commonSlope(start, end))
+                                    .bound();
+        }
+        return bound * (end - start);
+    }
+
+    /** Slope of the common channel over a stretch; none where there is no such channel. */
+    private SlopeTest commonSlope(double start, double end) {
+        if (common.isEmpty()) {
+            return SlopeTest.NONE;
+        }
+        ChannelSamples c = common.get();
+        int a = c.from(start);
+        int b = c.to(end);
+        return b - a < FEWEST ? SlopeTest.NONE : slope(c, a, b);
     }
 
     private Evidence drift(ChannelSamples c, double start, double end) {
@@ -171,7 +203,13 @@ final class WindowTests {
         if (b - a < FEWEST) {
             return new Evidence("drift", c.name(), Double.POSITIVE_INFINITY, harmless, c.unit(), false);
         }
+        if (common.isPresent() && c == common.get()) {
+            return new Evidence("drift", c.name() + " (common)", 0.0, harmless, c.unit(), true);
+        }
         SlopeTest slope = slope(c, a, b);
+        if (request.followers().contains(c.name())) {
+            slope = slope.against(commonSlope(start, end));
+        }
         double travel = slope.bound() * (end - start);
         if (travel <= harmless) {
             return new Evidence("drift", c.name(), travel, harmless, c.unit(), true);
@@ -189,6 +227,12 @@ final class WindowTests {
             edges[i] = c.from(start + i * part);
         }
         edges[SUB_WINDOWS] = c.to(end);
+        double follow = request.followers().contains(c.name())
+                ? commonSlope(start, end).slope() * part
+                : 0.0;
+        if (common.isPresent() && c == common.get()) {
+            return new Evidence("march", c.name() + " (common)", 0.0, harmless, c.unit(), true);
+        }
         int up = 0;
         int down = 0;
         for (int i = 0; i < SUB_WINDOWS; i++) {
@@ -196,7 +240,7 @@ final class WindowTests {
                 return new Evidence("march", c.name(), Double.POSITIVE_INFINITY, harmless, c.unit(), false);
             }
             if (i > 0) {
-                double step = c.mean(edges[i], edges[i + 1]) - c.mean(edges[i - 1], edges[i]);
+                double step = c.mean(edges[i], edges[i + 1]) - c.mean(edges[i - 1], edges[i]) - follow;
                 up += step > 0.0 ? 1 : 0;
                 down += step < 0.0 ? 1 : 0;
             }
@@ -205,7 +249,9 @@ final class WindowTests {
         if (!marches) {
             return new Evidence("march", c.name(), 0.0, harmless, c.unit(), true);
         }
-        double range = Math.abs(c.mean(edges[SUB_WINDOWS - 1], edges[SUB_WINDOWS]) - c.mean(edges[0], edges[1]));
+        double range = Math.abs(c.mean(edges[SUB_WINDOWS - 1], edges[SUB_WINDOWS])
+                - c.mean(edges[0], edges[1])
+                - (SUB_WINDOWS - 1) * follow);
         double limit = harmless;
         if (range > harmless) {
             double error = 0.0;

@@ -54,7 +54,7 @@ final class WindowFinderTest {
             double minimum,
             Map<String, Double> target,
             Optional<WindowRequest.Declared> declared) {
-        return new WindowRequest(channels, plate, power, 400.0, 0.01, minimum, target, Map.of(), declared);
+        return new WindowRequest(channels, plate, power, 400.0, 0.01, minimum, target, Map.of(), declared, Optional.empty(), Set.of());
     }
 
     /** A heated run of 45 min: plate with time constant tau, air with drift per hour, 40 W with ripple. */
@@ -206,7 +206,9 @@ final class WindowFinderTest {
                 600.0,
                 Map.of("T", 0.5, "P", 0.1),
                 Map.of(),
-                Optional.empty()));
+                Optional.empty(),
+                Optional.empty(),
+                Set.of()));
         SteadyWindow w = o.window().orElseThrow();
         // Check values: the bound is 1.7 % for the 600 s to 3000 s and 0.6 % for those to 3600 s.
         assertTrue(w.startS() - T0 > 2400.0, "start " + (w.startS() - T0));
