@@ -194,11 +194,36 @@ public final class LossCalibration {
             total += dx * LossTerm.Edge.rateWPerM(edge, far - drop, frame);
         }
         double meanPerCentre = (1.0 - beta * mean) / (1.0 - beta * centre);
-        double up = frame + (alongCentre(in, start) - frame) * meanPerCentre;
-        double down = frame + (alongCentre(in, in[layout.at(In.HEATED_END)]) - frame) * meanPerCentre;
+        double end = in[layout.at(In.HEATED_END)];
+        double loss = back + cover / area;
+        double outside = (back * plenum + cover / area * run.coverOuterK()) / loss;
+        double up = frame
+                + (alongCentre(in, start) + bend(in, 0, start, kt, loss, outside, width) - frame) * meanPerCentre;
+        double down = frame
+                + (alongCentre(in, end) + bend(in, layout.strips() - 1, end, kt, loss, outside, width) - frame)
+                        * meanPerCentre;
         total += LossTerm.EndConduction.rateW(parameters[2], up, in[layout.at(In.NOSE_TEMPERATURE)]);
         total += LossTerm.EndConduction.rateW(parameters[3], down, in[layout.at(In.TAIL_TEMPERATURE)]);
         return total;
+    }
+
+    /**
+     * What the straight line through the two outer junctions misses at the sheet's end, K: there the strip's flux and the
+     * losses bend the temperature by a known k t T'' = h (T − T_outside) − q_e.
+     */
+    private double bend(
+            double[] in, int strip, double x, double kt, double loss, double outside, double width) {
+        int a = strip == 0 ? stations[0] : stations[stations.length - 2];
+        int b = strip == 0 ? stations[1] : stations[stations.length - 1];
+        double stretch = (in[layout.at(In.HEATED_END)] - in[layout.at(In.HEATED_START)]) / (grid.endM - grid.startM);
+        double stripLength = 0.0;
+        for (int i = 0; i < grid.cells; i++) {
+            stripLength += grid.strip[i] == strip ? stretch * (grid.faces[i + 1] - grid.faces[i]) : 0.0;
+        }
+        double flux = (in[layout.power(strip)] - in[layout.lead(strip)]) / (stripLength * width);
+        double mean = 0.5 * (sheet(in, a) + sheet(in, b));
+        double curvature = (loss * (mean - outside) - flux) / kt;
+        return 0.5 * curvature * (x - in[layout.place(a)]) * (x - in[layout.place(b)]);
     }
 
     /** Sheet temperature on the centre line, straight lines between junctions and beyond the outer ones, K. */

@@ -23,6 +23,8 @@ final class PlateEquations {
     private final boolean covered;
     private final double reference;
     private final double nose;
+    private final double noseShare;
+    private final double tailShare;
     private final double tail;
     private final double[] ofUnity;
     private final double[] scratch;
@@ -67,8 +69,10 @@ final class PlateEquations {
         } else {
             throw new IllegalArgumentException("unknown convection " + convection);
         }
-        nose = endConductance(panel.noseWPerK(), grid.length(0));
-        tail = endConductance(panel.tailWPerK(), grid.length(along - 1));
+        noseShare = spanShare(0);
+        tailShare = spanShare(along - 1);
+        nose = endConductance(panel.noseWPerK() * (1.0 - noseShare), grid.length(0));
+        tail = endConductance(panel.tailWPerK() * (1.0 - tailShare), grid.length(along - 1));
         ofUnity = new double[along];
         scratch = new double[along];
         double[] ones = new double[along];
@@ -110,8 +114,36 @@ final class PlateEquations {
         for (int i = 0; i < along; i++) {
             source[i] += ofUnity[i] * above - correction[i] + r * scratch[i];
         }
-        source[0] += nose * (around.noseK() - reference) / grid.length(0);
-        source[along - 1] += tail * (around.tailK() - reference) / grid.length(along - 1);
+        source[0] += nose * (noseK(around) - reference) / grid.length(0);
+        source[along - 1] += tail * (tailK(around) - reference) / grid.length(along - 1);
+    }
+
+    /**
+     * What the far field is linked to at an end. Heat leaves an end at the span's mean temperature, T − s (T − T_frame):
+     * G [T − s (T − T_frame) − T_nose] = G (1 − s) [T − (T_nose − s T_frame)/(1 − s)].
+     */
+    private double noseK(Surround around) {
+        return (around.noseK() - noseShare * around.frameK()) / (1.0 - noseShare);
+    }
+
+    private double tailK(Surround around) {
+        return (around.tailK() - tailShare * around.frameK()) / (1.0 - tailShare);
+    }
+
+    /** By what share of (T − T_frame) the edges lower the span's mean below the far field, at a cell. */
+    private double spanShare(int cell) {
+        double coefficient = isothermal[cell] + (covered ? 0.0 : radiationCoefficient);
+        Surround cold = new Surround(0.0, 0.0, 0.0, 0.0, 0.0, 0.0);
+        double[] line = new double[across];
+        SpanFin.FarField far = new SpanFin.FarField(coefficient, 1.0, coefficient);
+        fin.solve(far, cold, line);
+        double mean = 0.0;
+        double span = 0.0;
+        for (int j = 0; j < across; j++) {
+            mean += grid.width(j) * fin.sheetK(line[j], far, cold);
+            span += grid.width(j);
+        }
+        return 1.0 - mean / span / fin.sheetK(1.0, far, cold);
     }
 
     /** Adds strip powers (W) to the sources, W/m². */
@@ -205,8 +237,8 @@ final class PlateEquations {
                 covered ? through : 0.0,
                 back,
                 edgeHeat,
-                panel.widthM() * nose * (sheet[0] + reference - around.noseK()),
-                panel.widthM() * tail * (sheet[along - 1] + reference - around.tailK()),
+                panel.widthM() * nose * (sheet[0] + reference - noseK(around)),
+                panel.widthM() * tail * (sheet[along - 1] + reference - tailK(around)),
                 storage);
         return new PlateState(
                 panel, grid, sheetField, faceField, fluxField, radiationField, around, books, covered, stripW.clone());
