@@ -197,8 +197,8 @@ public final class LossCalibration {
         double end = in[layout.at(In.HEATED_END)];
         double loss = back + cover / area;
         double outside = (back * plenum + cover / area * run.coverOuterK()) / loss;
-        double up = frame
-                + (alongCentre(in, start) + bend(in, 0, start, kt, loss, outside, width) - frame) * meanPerCentre;
+        double up =
+                frame + (alongCentre(in, start) + bend(in, 0, start, kt, loss, outside, width) - frame) * meanPerCentre;
         double down = frame
                 + (alongCentre(in, end) + bend(in, layout.strips() - 1, end, kt, loss, outside, width) - frame)
                         * meanPerCentre;
@@ -211,8 +211,7 @@ public final class LossCalibration {
      * What the straight line through the two outer junctions misses at the sheet's end, K: there the strip's flux and the
      * losses bend the temperature by a known k t T'' = h (T − T_outside) − q_e.
      */
-    private double bend(
-            double[] in, int strip, double x, double kt, double loss, double outside, double width) {
+    private double bend(double[] in, int strip, double x, double kt, double loss, double outside, double width) {
         int a = strip == 0 ? stations[0] : stations[stations.length - 2];
         int b = strip == 0 ? stations[1] : stations[stations.length - 1];
         double stretch = (in[layout.at(In.HEATED_END)] - in[layout.at(In.HEATED_START)]) / (grid.endM - grid.startM);

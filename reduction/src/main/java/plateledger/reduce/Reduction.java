@@ -108,8 +108,7 @@ public final class Reduction {
         }
         WindowStage.Outcome outcome = read.get();
         if (outcome.means().isEmpty()) {
-            return new RunResult(
-                    run, RunState.NOT_STEADY, outcome.reason(), outcome.window(), Optional.empty());
+            return new RunResult(run, RunState.NOT_STEADY, outcome.reason(), outcome.window(), Optional.empty());
         }
         String refused = reduced.refused().get(run.id());
         if (refused != null) {
@@ -126,15 +125,16 @@ public final class Reduction {
     /** A run that was not read: planned, left out, or not asked for. */
     private static RunResult idle(Run run, ReductionOptions options) {
         if (run.leftOut().isPresent()) {
-            return new RunResult(
-                    run, RunState.LEFT_OUT, run.leftOut().get(), Optional.empty(), Optional.empty());
+            return new RunResult(run, RunState.LEFT_OUT, run.leftOut().get(), Optional.empty(), Optional.empty());
         }
         RunState state = run.planned() || asked(run, options) ? RunState.PLANNED : RunState.WAITING;
         return new RunResult(run, state, "", Optional.empty(), Optional.empty());
     }
 
     private static boolean asked(Run run, ReductionOptions options) {
-        return options.runs().isEmpty() || run.type() != RunType.HEATED || options.runs().contains(run.id());
+        return options.runs().isEmpty()
+                || run.type() != RunType.HEATED
+                || options.runs().contains(run.id());
     }
 
     private record Read(Campaign campaign, Map<String, RunLogs> logs, List<Finding> findings) {

@@ -56,8 +56,7 @@ final class WindowStage {
      * @param reason why there is none; empty otherwise
      * @param findings channels lost in the window
      */
-    record Outcome(
-            Optional<SteadyWindow> window, Optional<RunMeans> means, String reason, List<Finding> findings) {}
+    record Outcome(Optional<SteadyWindow> window, Optional<RunMeans> means, String reason, List<Finding> findings) {}
 
     Outcome find(RunLogs logs) {
         Run run = logs.run();
@@ -71,8 +70,7 @@ final class WindowStage {
         }
         boolean loss = run.type() == RunType.LOSS;
         boolean powered = loss || run.type() == RunType.HEATED;
-        Optional<Series> power =
-                powered ? plate.flatMap(p -> totalPower(p, logs.series())) : Optional.empty();
+        Optional<Series> power = powered ? plate.flatMap(p -> totalPower(p, logs.series())) : Optional.empty();
         WindowOutcome outcome = WindowFinder.find(new WindowRequest(
                 channels,
                 junctions(plate, channels.keySet()),
@@ -82,8 +80,7 @@ final class WindowStage {
                 minimum(run),
                 targets(channels, power, plate),
                 resolutions(channels.keySet()),
-                run.declaredWindow()
-                        .map(w -> new WindowRequest.Declared(w.startS(), w.endS(), w.reason())),
+                run.declaredWindow().map(w -> new WindowRequest.Declared(w.startS(), w.endS(), w.reason())),
                 Optional.of(campaign.rig().surroundings().airChannel()).filter(channels::containsKey),
                 followers(channels.keySet())));
         if (outcome.window().isEmpty()) {
@@ -92,8 +89,7 @@ final class WindowStage {
         SteadyWindow window = outcome.window().get();
         List<Finding> findings = new ArrayList<>();
         Set<String> lost = lost(run, logs, window, findings);
-        return new Outcome(
-                Optional.of(window), Optional.of(means(logs, plate, window, lost)), "", findings);
+        return new Outcome(Optional.of(window), Optional.of(means(logs, plate, window, lost)), "", findings);
     }
 
     /** Fan-off zeros are short by nature: three minutes (design of the method), everything else as declared. */
@@ -175,14 +171,12 @@ final class WindowStage {
     }
 
     /** The uncertainty by which each channel's mean is judged; half of it is harmless as a drift. */
-    private Map<String, Double> targets(
-            Map<String, Series> channels, Optional<Series> power, Optional<Plate> plate) {
+    private Map<String, Double> targets(Map<String, Series> channels, Optional<Series> power, Optional<Plate> plate) {
         Map<String, Double> targets = new HashMap<>();
         double watts = power.map(WindowStage::typical).orElse(0.0);
         power.ifPresent(p -> targets.put(POWER, POWER_SHARE * watts));
-        channels.forEach((name, series) -> campaign.rig()
-                .instrumentOf(name)
-                .ifPresent(i -> targets.put(name, target(i, series))));
+        channels.forEach((name, series) ->
+                campaign.rig().instrumentOf(name).ifPresent(i -> targets.put(name, target(i, series))));
         plate.ifPresent(p -> lossTargets(p, watts, targets));
         plate.ifPresent(p -> junctionTargets(p, channels, targets));
         speedTargets(channels, targets);
@@ -192,15 +186,25 @@ final class WindowStage {
     /** Surroundings matter by their conductance to the sheet: a drift worth a thousandth of the power is harmless. */
     private void lossTargets(Plate plate, double watts, Map<String, Double> targets) {
         var s = campaign.rig().surroundings();
-        double heated =
-                plate.heatedEndM().value() - plate.heatedStartM().value();
+        double heated = plate.heatedEndM().value() - plate.heatedStartM().value();
         double allowed = LOSS_SHARE * watts;
-        widen(targets, s.plenumChannels(), allowed
-                / (plate.backConductanceWPerM2K().value() * heated * plate.widthM().value()));
-        widen(targets, s.frameChannels(), allowed
-                / (2.0 * plate.edgeConductanceWPerMK().value() * heated));
-        widen(targets, s.wallChannels(), allowed
-                / PlateScales.radiationConductanceWPerK(plate, s.exchangeFactor().value(), ROOM_K));
+        widen(
+                targets,
+                s.plenumChannels(),
+                allowed
+                        / (plate.backConductanceWPerM2K().value()
+                                * heated
+                                * plate.widthM().value()));
+        widen(
+                targets,
+                s.frameChannels(),
+                allowed / (2.0 * plate.edgeConductanceWPerMK().value() * heated));
+        widen(
+                targets,
+                s.wallChannels(),
+                allowed
+                        / PlateScales.radiationConductanceWPerK(
+                                plate, s.exchangeFactor().value(), ROOM_K));
         widen(targets, s.noseChannels(), allowed / plate.noseConductanceWPerK().value());
         widen(targets, s.tailChannels(), allowed / plate.tailConductanceWPerK().value());
     }
@@ -234,7 +238,9 @@ final class WindowStage {
             Series series = channels.get(meter.channel());
             if (series != null) {
                 double power = meter.principle() == Surroundings.SpeedPrinciple.PITOT ? 2.0 : 1.0;
-                double relative = power * meter.factor().standardUncertainty() / meter.factor().value();
+                double relative = power
+                        * meter.factor().standardUncertainty()
+                        / meter.factor().value();
                 widen(targets, List.of(meter.channel()), relative * Math.abs(typical(series)));
             }
         }
@@ -251,10 +257,10 @@ final class WindowStage {
     private static double target(Instrument i, Series series) {
         double typical = typical(series);
         double gain = Math.hypot(i.gain().standardUncertainty(), i.channelGain().standardUncertainty());
-        double offset = Math.hypot(i.offset().standardUncertainty(), i.channelOffset().standardUncertainty());
+        double offset =
+                Math.hypot(i.offset().standardUncertainty(), i.channelOffset().standardUncertainty());
         double drift = i.dailyDrift().standardUncertainty();
-        double whole = Math.sqrt(
-                offset * offset + drift * drift + Math.pow(gain * (typical - i.gainOrigin()), 2));
+        double whole = Math.sqrt(offset * offset + drift * drift + Math.pow(gain * (typical - i.gainOrigin()), 2));
         double floor = Math.max(whole, i.resolution());
         return switch (i.kind()) {
             case VOLTAGE, CURRENT -> Math.max(floor, 0.5 * POWER_SHARE * Math.abs(typical));
@@ -306,9 +312,9 @@ final class WindowStage {
             }
         });
         Estimate drift = plate.map(p -> drift(p, window, lost)).orElse(Estimate.of(0.0, 0.0));
-        double[] covariance = plate.map(p -> covariance(p, logs.series(), window)).orElse(new double[0]);
-        return new RunMeans(
-                logs.run(), means, drift, covariance, 0.5 * (window.startS() + window.endS()));
+        double[] covariance =
+                plate.map(p -> covariance(p, logs.series(), window)).orElse(new double[0]);
+        return new RunMeans(logs.run(), means, drift, covariance, 0.5 * (window.startS() + window.endS()));
     }
 
     /** Mean slope of the centre-line junctions; their errors are taken as common, since the room drives them together. */

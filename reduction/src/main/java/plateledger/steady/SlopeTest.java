@@ -19,12 +19,8 @@ public record SlopeTest(double slope, double standardError, double dof, double t
     /** This slope less another, their errors taken as independent; the smaller dof. */
     SlopeTest against(SlopeTest other) {
         return new SlopeTest(
-                slope - other.slope,
-                Math.hypot(standardError, other.standardError),
-                Math.min(dof, other.dof),
-                tau);
+                slope - other.slope, Math.hypot(standardError, other.standardError), Math.min(dof, other.dof), tau);
     }
-
 
     /**
      * Fits a line.

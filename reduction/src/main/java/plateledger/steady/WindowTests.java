@@ -51,7 +51,8 @@ final class WindowTests {
         this.power = power;
         this.order = new ArrayList<>(channels);
         this.common = request.common()
-                .flatMap(name -> channels.stream().filter(c -> c.name().equals(name)).findFirst());
+                .flatMap(name ->
+                        channels.stream().filter(c -> c.name().equals(name)).findFirst());
     }
 
     /** True if a stretch (times from the origin) passes every test. */
@@ -227,9 +228,8 @@ final class WindowTests {
             edges[i] = c.from(start + i * part);
         }
         edges[SUB_WINDOWS] = c.to(end);
-        double follow = request.followers().contains(c.name())
-                ? commonSlope(start, end).slope() * part
-                : 0.0;
+        double follow =
+                request.followers().contains(c.name()) ? commonSlope(start, end).slope() * part : 0.0;
         if (common.isPresent() && c == common.get()) {
             return new Evidence("march", c.name() + " (common)", 0.0, harmless, c.unit(), true);
         }

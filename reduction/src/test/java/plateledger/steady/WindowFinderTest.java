@@ -54,7 +54,8 @@ final class WindowFinderTest {
             double minimum,
             Map<String, Double> target,
             Optional<WindowRequest.Declared> declared) {
-        return new WindowRequest(channels, plate, power, 400.0, 0.01, minimum, target, Map.of(), declared, Optional.empty(), Set.of());
+        return new WindowRequest(
+                channels, plate, power, 400.0, 0.01, minimum, target, Map.of(), declared, Optional.empty(), Set.of());
     }
 
     /** A heated run of 45 min: plate with time constant tau, air with drift per hour, 40 W with ripple. */
