@@ -157,8 +157,8 @@ final class RunLog {
             double u = instrument
                     .map(i -> InstrumentEquation.standardUncertainty(i, raw))
                     .orElse(0.0);
-            return Optional.of(
-                    new Peak(channel, value, 2.0 * u, trueTimes(s)[at], new Place(s.file(), s.lines()[at], 0)));
+            return Optional.of(new Peak(
+                    channel, value, 2.0 * u, clock(s).trueTime(s.timesS()[at]), new Place(s.file(), s.lines()[at], 0)));
         });
     }
 

@@ -86,6 +86,9 @@ final class SensorChecks {
             return heated;
         }
         Series s = found.get();
+        if (s.count(Series.Flag.VALID) == s.size()) {
+            return List.of();
+        }
         boolean[] lost = new boolean[s.size()];
         for (int i = 0; i < lost.length; i++) {
             lost[i] = s.flags()[i] != Series.Flag.VALID.code() && s.flags()[i] != Series.Flag.SPIKE.code();

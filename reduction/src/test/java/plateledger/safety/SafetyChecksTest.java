@@ -33,8 +33,8 @@ final class SafetyChecksTest {
     void soundRigHasNoStop() {
         List<Finding> findings = new RigUnderTest().findings(folder);
         assertEquals(List.of(), ids(findings, Level.STOP), findings::toString);
-        // The example declares device, earth and guard without the date of a test, and plans P01 without power.
-        assertEquals(List.of("PROTECT-TEST"), ids(findings, Level.CAUTION), findings::toString);
+        assertEquals(List.of(), ids(findings, Level.CAUTION), findings::toString);
+        // The example plans P01 without power.
         assertEquals(List.of("PLAN-SURFACE"), ids(findings, Level.NOT_CHECKED), findings::toString);
         assertTrue(findings.stream()
                 .allMatch(f -> f.level() == Level.NOT_CHECKED || !f.source().isEmpty()));
@@ -202,6 +202,25 @@ final class SafetyChecksTest {
         RigUnderTest fresh = new RigUnderTest().replace("rig.toml", "tested = 2026-02-20", "tested = 2025-03-11");
         assertTrue(fresh.findings(folder.resolve("b")).stream()
                 .noneMatch(f -> f.subject().equals("flow interlock")));
+    }
+
+    @Test
+    void aMeasureWithoutTheDateOfATestIsACaution() {
+        RigUnderTest rig = new RigUnderTest()
+                .replace("rig.toml", "setting = \"mesh 12 mm\"\ntested = 2026-02-20", "setting = \"mesh 12 mm\"");
+        Finding caution = only(rig, "PROTECT-TEST");
+        assertEquals(Level.CAUTION, caution.level());
+        assertEquals("fan guard", caution.subject());
+    }
+
+    @Test
+    void aMeasureOfWhichNothingIsStatedIsNotChecked() {
+        RigUnderTest rig = new RigUnderTest()
+                .replace(
+                        "rig.toml",
+                        "[protection.fan_guard]\ndeclared = true\nsetting = \"mesh 12 mm\"\ntested = 2026-02-20\n",
+                        "");
+        assertEquals(Level.NOT_CHECKED, only(rig, "PROTECT-FAN_GUARD").level());
     }
 
     /** 20 V · 1.95 A twice is 650 W/m²: above 60 °C without flow, above the limit set here. */
