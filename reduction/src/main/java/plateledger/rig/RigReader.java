@@ -2,7 +2,6 @@ package plateledger.rig;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.Collection;
 import java.util.Comparator;
 import java.util.HashSet;
@@ -98,7 +97,7 @@ public final class RigReader {
                 root.findTable("protection", RigReader::protections).orElseGet(List::of);
         noteSilence(protections);
         List<Plate> plates = root.needNamedLike("plate", "id", (id, t) -> plate(id, t, channels.copy()));
-        return new Rig(title, plates, surroundings, instruments.orElse(List.of()), limits, completed(protections));
+        return new Rig(title, plates, surroundings, instruments.orElse(List.of()), limits, protections);
     }
 
     private Plate plate(String id, KeyTable t, ChannelUse channels) {
@@ -239,15 +238,6 @@ public final class RigReader {
         return kind.name().toLowerCase(Locale.ROOT);
     }
 
-    private static List<Protection> completed(List<Protection> stated) {
-        return Arrays.stream(Protection.Kind.values())
-                .map(kind -> stated.stream()
-                        .filter(protection -> protection.kind() == kind)
-                        .findFirst()
-                        .orElseGet(() -> new Protection(kind, false, "", Optional.empty())))
-                .toList();
-    }
-
     private void noteSilence(List<Protection> stated) {
         Set<Protection.Kind> silent = new LinkedHashSet<>(List.of(Protection.Kind.values()));
         stated.forEach(protection -> silent.remove(protection.kind()));
@@ -259,7 +249,8 @@ public final class RigReader {
                     "protection." + key(kind),
                     "no such table",
                     "a statement whether the rig has it",
-                    "It counts as absent; add [protection." + key(kind) + "] with declared = true or false.",
+                    "Flow interlock and cut-out count as absent then, others as not checked; add [protection."
+                            + key(kind) + "] with declared = true or false.",
                     ""));
         }
     }
