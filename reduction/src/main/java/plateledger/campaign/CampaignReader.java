@@ -1,5 +1,6 @@
 package plateledger.campaign;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.time.ZoneId;
@@ -71,6 +72,9 @@ public final class CampaignReader {
      * @throws RefusedException with every finding of all three files if anything makes the campaign unusable
      */
     public static Outcome read(Path folder) throws RefusedException {
+        if (!Files.isDirectory(folder)) {
+            throw new RefusedException(noFolder(folder));
+        }
         Set<Finding> findings = new LinkedHashSet<>();
         Optional<InstrumentReader.Reading> instruments = InstrumentReader.read(folder, findings);
         Optional<RigReader.Reading> rig =
@@ -82,6 +86,19 @@ public final class CampaignReader {
             throw new RefusedException(sorted);
         }
         return new Outcome(campaign.get(), sorted);
+    }
+
+    private static Finding noFolder(Path folder) {
+        boolean file = Files.exists(folder);
+        return new Finding(
+                "CAMPAIGN-FOLDER",
+                Level.STOP,
+                Place.of(folder.toString()),
+                "campaign folder",
+                file ? "a file" : "no such folder",
+                "a folder that holds " + FILE + ", " + RigReader.FILE + " and " + InstrumentReader.FILE,
+                file ? "Name the folder that the file lies in." : "Correct the name, or make the folder with new.",
+                "");
     }
 
     /** Every key accepted in {@code campaign.toml}. */

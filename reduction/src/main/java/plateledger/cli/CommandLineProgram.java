@@ -5,10 +5,12 @@ import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.time.Clock;
 import picocli.AutoComplete;
 import picocli.CommandLine;
 import picocli.CommandLine.Help.Ansi;
 import plateledger.audit.Program;
+import plateledger.report.OutputFolder;
 
 /** The program as called from a command line. */
 public final class CommandLineProgram {
@@ -37,7 +39,19 @@ public final class CommandLineProgram {
      * @return exit status, see {@link ExitStatus}
      */
     public static int run(Terminal terminal, String... args) {
-        CommandLine line = commandLine(terminal);
+        return run(terminal, OutputFolder.TO_DISK, args);
+    }
+
+    /**
+     * Runs the program with another way to write result files, so that a full disk can be tried out.
+     *
+     * @param terminal where it speaks
+     * @param writing how each result file is written
+     * @param args arguments
+     * @return exit status, see {@link ExitStatus}
+     */
+    public static int run(Terminal terminal, OutputFolder.Writing writing, String... args) {
+        CommandLine line = commandLine(terminal, writing);
         if (args.length == 0) {
             line.usage(terminal.out());
             terminal.out().flush();
@@ -48,7 +62,13 @@ public final class CommandLineProgram {
 
     /** The commands with their options; for help and completion too. */
     static CommandLine commandLine(Terminal terminal) {
+        return commandLine(terminal, OutputFolder.TO_DISK);
+    }
+
+    private static CommandLine commandLine(Terminal terminal, OutputFolder.Writing writing) {
         CommandLine line = new CommandLine(new RootCommand());
+        line.addSubcommand(new ReduceCommand(terminal, writing, Clock.systemUTC()));
+        line.addSubcommand(new CheckCommand(terminal));
         line.addSubcommand(new NewCommand(terminal));
         line.addSubcommand(new PropertiesCommand(terminal));
         line.addSubcommand("completion", new AutoComplete.GenerateCompletion());

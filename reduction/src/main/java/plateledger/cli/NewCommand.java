@@ -68,7 +68,7 @@ final class NewCommand implements Callable<Integer> {
             terminal.out().flush();
             return ExitStatus.DONE;
         } catch (RefusedException e) {
-            FindingList.print(terminal.err(), e.findings());
+            FindingList.full().print(terminal.err(), e.findings());
             terminal.err().println("Nothing was written.");
             return ExitStatus.NOTHING_WRITTEN;
         }

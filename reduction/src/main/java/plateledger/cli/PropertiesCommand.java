@@ -56,7 +56,7 @@ final class PropertiesCommand implements Callable<Integer> {
             terminal.out().flush();
             return ExitStatus.DONE;
         } catch (RefusedException e) {
-            FindingList.print(terminal.err(), e.findings());
+            FindingList.full().print(terminal.err(), e.findings());
             return ExitStatus.NOTHING_WRITTEN;
         }
     }

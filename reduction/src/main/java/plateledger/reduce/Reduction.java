@@ -12,6 +12,8 @@ import plateledger.campaign.CampaignReader;
 import plateledger.campaign.Run;
 import plateledger.campaign.RunType;
 import plateledger.finding.Finding;
+import plateledger.finding.Level;
+import plateledger.finding.Place;
 import plateledger.finding.RefusedException;
 import plateledger.log.LogData;
 import plateledger.log.Series;
@@ -147,6 +149,7 @@ public final class Reduction {
             throws RefusedException, CancelledException {
         CampaignReader.Outcome outcome = CampaignReader.read(folder);
         Campaign campaign = outcome.campaign();
+        refuseUnknownRuns(campaign, options);
         List<Run> wanted = campaign.runs().stream()
                 .filter(run -> !run.planned() && run.leftOut().isEmpty() && asked(run, options))
                 .toList();
@@ -158,5 +161,28 @@ public final class Reduction {
         logs.forEach((id, l) -> series.put(id, List.copyOf(l.series().values())));
         findings.addAll(SafetyChecks.findings(campaign, series));
         return new Read(campaign, logs, findings);
+    }
+
+    private static void refuseUnknownRuns(Campaign campaign, ReductionOptions options) throws RefusedException {
+        List<String> heated = campaign.runs().stream()
+                .filter(run -> run.type() == RunType.HEATED)
+                .map(Run::id)
+                .toList();
+        List<Finding> unknown = options.runs().stream()
+                .sorted()
+                .filter(id -> !heated.contains(id))
+                .map(id -> new Finding(
+                        "RUN-UNKNOWN",
+                        Level.STOP,
+                        Place.of(CampaignReader.FILE),
+                        "runs to reduce",
+                        campaign.run(id).isPresent() ? id + ", which is no heated run" : id + ", which is not declared",
+                        "heated runs: " + String.join(", ", heated),
+                        "Name heated runs only; zeros and loss runs are always used.",
+                        ""))
+                .toList();
+        if (!unknown.isEmpty()) {
+            throw new RefusedException(unknown);
+        }
     }
 }

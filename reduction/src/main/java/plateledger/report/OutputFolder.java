@@ -26,7 +26,8 @@ public final class OutputFolder {
         void write(Path file, byte[] content) throws IOException;
     }
 
-    private static final Writing TO_DISK = (file, content) -> Files.write(file, content);
+    /** Writes to the disk; what every start of the program uses. */
+    public static final Writing TO_DISK = (file, content) -> Files.write(file, content);
 
     private final Path target;
     private final Path fresh;

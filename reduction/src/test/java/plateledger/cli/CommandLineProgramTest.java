@@ -58,7 +58,7 @@ final class CommandLineProgramTest {
         List<String> names = line.getSubcommands().keySet().stream()
                 .filter(name -> !name.equals("completion"))
                 .toList();
-        assertTrue(names.containsAll(List.of("new", "properties")), names.toString());
+        assertTrue(names.containsAll(List.of("reduce", "check", "new", "properties")), names.toString());
         for (String name : names) {
             Said said = run(name, "--help");
             assertEquals(0, said.status, name);
