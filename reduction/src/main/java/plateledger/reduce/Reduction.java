@@ -156,7 +156,6 @@ public final class Reduction {
         Map<String, RunLogs> logs = LogStage.read(folder, campaign, wanted, options.threads(), progress);
         List<Finding> findings = new ArrayList<>(outcome.notes());
         logs.values().forEach(l -> findings.addAll(l.findings()));
-        findings.addAll(ResultFindings.clocks(campaign));
         Map<String, List<Series>> series = new LinkedHashMap<>();
         logs.forEach((id, l) -> series.put(id, List.copyOf(l.series().values())));
         findings.addAll(SafetyChecks.findings(campaign, series));

@@ -87,6 +87,6 @@ final class DemoTruthTest {
         assertTrue(ids.contains("SENSOR-STUCK"), () -> "stuck: " + ids);
         assertTrue(ids.contains("SENSOR-SPIKE"), () -> "spike: " + ids);
         assertTrue(ids.contains("LOG-OVER-RANGE"), () -> "over-range: " + ids);
-        assertTrue(ids.contains("CLOCK-ASSUMED"), () -> "clock: " + ids);
+        assertTrue(ids.contains("CAMPAIGN-CLOCK"), () -> "clock: " + ids);
     }
 }
