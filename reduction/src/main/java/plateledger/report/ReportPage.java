@@ -23,6 +23,7 @@ import plateledger.fit.FitResult;
 import plateledger.reduce.CampaignResult;
 import plateledger.reduce.RunResult;
 import plateledger.reduce.RunState;
+import plateledger.safety.Cautions;
 
 /** {@code report.html}: the test report in one file, without scripts, with its own typeface and figures. */
 final class ReportPage {
@@ -34,10 +35,11 @@ final class ReportPage {
     private final CampaignResult result;
     private final AuditRecord audit;
     private final List<Figures.Figure> figures;
-    private final List<String> cautions;
+    private final List<Cautions.Caution> cautions;
     private final List<RunGroup> groups;
 
-    ReportPage(CampaignResult result, AuditRecord audit, List<Figures.Figure> figures, List<String> cautions) {
+    ReportPage(
+            CampaignResult result, AuditRecord audit, List<Figures.Figure> figures, List<Cautions.Caution> cautions) {
         this.result = result;
         this.audit = audit;
         this.figures = List.copyOf(figures);
@@ -114,7 +116,12 @@ final class ReportPage {
         model.put("windows", RunSections.windows(result));
         model.put("clocks", RunSections.clocks(campaign));
         model.put("findings", findings());
-        model.put("cautions", cautions);
+        model.put(
+                "cautions",
+                cautions.stream()
+                        .map(c -> Map.of("topic", c.topic(), "text", c.text(), "source", c.source()))
+                        .toList());
+        model.put("notAProof", Cautions.NOT_A_PROOF);
         model.put("deviations", RunSections.deviations(result));
         model.put("notUsed", RunSections.notUsed(result));
         model.put("audit", auditTable());
