@@ -176,13 +176,11 @@ final class Booking {
                         + curvature);
         t.back += cell * LossTerm.Back.flux(sheet.backWPerM2K, s.sheetK[i] - meanDrop + misfit[i], sheet.plenumK);
         t.edge += sheet.dx[i] * LossTerm.Edge.rateWPerM(sheet.edgeWPerMK, s.sheetK[i] - drop, sheet.frameK);
-        t.storage += cell
-                * (sheet.store
-                        + LossTerm.Back.flux(sheet.soakWPerM2K, s.sheetK[i] - meanDrop + misfit[i], sheet.plenumK));
+        t.storage += cell * sheet.store;
     }
 
     private double conductionLength(int cell) {
-        return SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.behindWPerM2K);
+        return SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.backWPerM2K);
     }
 
     /** Rate out of an end of the sheet, at the span's mean temperature there, W. */
@@ -245,8 +243,7 @@ final class Booking {
         double radiation = LossTerm.Radiation.flux(sheet.exchange, sheet.emissivity, ts, sheet.wallK);
         double back = LossTerm.Back.flux(sheet.backWPerM2K, metal, sheet.plenumK);
         double electrical = sheet.qe[c + 1];
-        double stored = sheet.store + LossTerm.Back.flux(sheet.soakWPerM2K, metal, sheet.plenumK);
-        double conduction = electrical - q - radiation - back - stored;
+        double conduction = electrical - q - radiation - back - sheet.store;
         double film = propertyTemperature(ts);
         double k = stream.conductivity(film);
         double re = get(In.SPEED) * x / stream.kinematicViscosity(film);
@@ -260,7 +257,7 @@ final class Booking {
         put(j, StationOut.Q_BACK, back);
         put(j, StationOut.Q_CONDUCTION, conduction);
         put(j, StationOut.Q_CONVECTION, q);
-        put(j, StationOut.Q_CONVECTION_LOCAL, localBalance(j, electrical, radiation, back + stored));
+        put(j, StationOut.Q_CONVECTION_LOCAL, localBalance(j, electrical, radiation, back));
         put(j, StationOut.H, h);
         put(j, StationOut.RE_X, re);
         put(j, StationOut.NU_X, h * x / k);
@@ -275,7 +272,7 @@ final class Booking {
     }
 
     /** q from the readings alone: electrical less booked losses and the three-point difference of neighbours. */
-    private double localBalance(int j, double electrical, double radiation, double behind) {
+    private double localBalance(int j, double electrical, double radiation, double back) {
         int last = model.stationJunction.length - 1;
         if (j == 0 || j == last || !used(model.stationJunction[j - 1]) || !used(model.stationJunction[j + 1])) {
             return Double.NaN;
@@ -289,6 +286,6 @@ final class Booking {
         double left = (in[layout.reading(b)] - in[layout.reading(a)]) / (xb - xa);
         double right = (in[layout.reading(c)] - in[layout.reading(b)]) / (xc - xb);
         double bend = (right - left) / (0.5 * (xc - xa));
-        return electrical - radiation - behind + sheet.sheetWPerK * bend;
+        return electrical - radiation - back - sheet.store + sheet.sheetWPerK * bend;
     }
 }

@@ -73,9 +73,7 @@ public final class RunLayout {
         /** Tail temperature. */
         TAIL_TEMPERATURE,
         /** Common drift of the sheet, K/s. */
-        DRIFT,
-        /** Share E of the insulation's slowest mode still to come, METHODS.md eq. (L-7). */
-        SOAK;
+        DRIFT;
 
         private static final In[] ALL = values();
     }

@@ -18,12 +18,8 @@ import plateledger.reduce.RunResult;
  *
  * @param groups runs of one plate and regime, in campaign order
  * @param fits fitted curves
- * @param form the form of the fits with the exponent of Pr, and what intervals are shown
  */
-public record NuRe(List<Group> groups, List<Curve> fits, String form) {
-    /** Nothing to draw. */
-    public static final NuRe NOTHING = new NuRe(List.of(), List.of(), "");
-
+public record NuRe(List<Group> groups, List<Curve> fits) {
     private static final int CURVE_POINTS = 41;
 
     /**
@@ -62,7 +58,7 @@ public record NuRe(List<Group> groups, List<Curve> fits, String form) {
     /**
      * A fitted curve over the range of Re of its points.
      *
-     * @param name the fit with its constants
+     * @param name the form with its constants
      * @param re Reynolds numbers
      * @param nu curve
      * @param low lower limit of its 95 % band
@@ -93,12 +89,7 @@ public record NuRe(List<Group> groups, List<Curve> fits, String form) {
                 result.fits().stream()
                         .filter(fit -> !fit.problem().points().isEmpty())
                         .map(NuRe::curve)
-                        .toList(),
-                result.fits().isEmpty()
-                        ? "Bars: 95 %"
-                        : "Fits: Nu = C·Reᵐ·Pr%s, with 95 %% band. Bars: 95 %%"
-                                .formatted(
-                                        exponent(result.campaign().definitions().prandtlExponent())));
+                        .toList());
     }
 
     /** True if there is nothing to draw. */
@@ -140,9 +131,10 @@ public record NuRe(List<Group> groups, List<Curve> fits, String form) {
     private static String name(FitResult fit) {
         Constants c = fit.twoStep();
         double k = fit.coverageFactor();
-        return "fit %s: C = %s, m = %s"
+        return "fit %s: Nu = C·Reᵐ·Pr%s, C = %s, m = %s"
                 .formatted(
                         fit.problem().id(),
+                        exponent(fit.problem().prandtlExponent()),
                         NumberText.withInterval(c.c(), c.c() * k * c.uLnC()),
                         NumberText.withInterval(c.m(), k * c.uM()));
     }

@@ -47,11 +47,6 @@ final class Score {
         return sumError / n;
     }
 
-    /** Mean of error ÷ u. */
-    double meanZ() {
-        return sumZ / n;
-    }
-
     /** Root mean square of error ÷ u. */
     double rmsZ() {
         return Math.sqrt(sumZ2 / n);
@@ -77,8 +72,7 @@ final class Score {
                 sdZ());
     }
 
-    static final String HEAD = """
-            | quantity | n | 95 % interval holds | too low | too high | mean error | sd(error/u) |
-            | --- | --- | --- | --- | --- | --- | --- |
-            """;
+    static final String HEAD =
+            "| quantity | n | 95 % interval holds | too low | too high | mean error | sd(error/u) |\n"
+                    + "| --- | --- | --- | --- | --- | --- | --- |\n";
 }

@@ -38,7 +38,7 @@ final class Simulated {
             m.mean()
                     .forEach((channel, value) -> means.put(
                             channel, Estimate.of(value, m.standardError().getOrDefault(channel, 0.0))));
-            out.add(plateledger.reduce.RunMeans.balanced(
+            out.add(new plateledger.reduce.RunMeans(
                     run,
                     means,
                     Estimate.of(m.plateSlopeKPerS(), m.plateSlopeStandardError()),
