@@ -57,18 +57,7 @@ public final class CommandLineProgram {
             terminal.out().flush();
             return ExitStatus.DONE;
         }
-        try {
-            return line.execute(args);
-        } catch (Error fault) { // exceptions are told by the handler below
-            return tell(terminal, fault);
-        }
-    }
-
-    private static int tell(Terminal terminal, Throwable fault) {
-        terminal.err().print("Fault in the program: ");
-        fault.printStackTrace(terminal.err());
-        terminal.err().println("Please report this with the lines above. Results are written whole or not at all.");
-        return ExitStatus.FAULT;
+        return line.execute(args);
     }
 
     /** The commands with their options; for help and completion too. */
@@ -90,7 +79,14 @@ public final class CommandLineProgram {
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.getCommandSpec().version("plateledger " + Program.versionOnly());
         line.getCommandSpec().exitCodeOnInvalidInput(ExitStatus.NOTHING_WRITTEN);
-        line.setExecutionExceptionHandler((fault, command, parsed) -> tell(terminal, fault));
+        line.setExecutionExceptionHandler((e, command, parsed) -> {
+            terminal.err().println("Fault in the program: " + e);
+            for (StackTraceElement frame : e.getStackTrace()) {
+                terminal.err().println("    at " + frame);
+            }
+            terminal.err().println("Please report this with the lines above; nothing was written.");
+            return ExitStatus.FAULT;
+        });
         for (CommandLine sub : line.getSubcommands().values()) {
             sub.getCommandSpec().exitCodeOnExecutionException(ExitStatus.FAULT);
         }

@@ -114,10 +114,13 @@ final class ReduceCommand implements Callable<Integer> {
     private void tell(CampaignResult result, OutputFolder folder, int files) {
         List<Finding> findings = result.findings();
         FindingList list = FindingList.folded("all in findings.csv");
-        list.print(terminal.err(), quiet ? FindingList.stops(findings) : findings);
         if (quiet) {
+            if (FindingList.anyStop(findings)) {
+                list.print(terminal.err(), FindingList.stops(findings));
+            }
             return;
         }
+        list.print(terminal.err(), findings);
         long asked = heated(result).filter(r -> r.state() != RunState.WAITING).count();
         long reduced = heated(result).filter(r -> r.state() == RunState.REDUCED).count();
         terminal.out().println("Reduced " + reduced + " of " + asked + " heated runs.");

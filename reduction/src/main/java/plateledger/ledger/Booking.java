@@ -176,11 +176,13 @@ final class Booking {
                         + curvature);
         t.back += cell * LossTerm.Back.flux(sheet.backWPerM2K, s.sheetK[i] - meanDrop + misfit[i], sheet.plenumK);
         t.edge += sheet.dx[i] * LossTerm.Edge.rateWPerM(sheet.edgeWPerMK, s.sheetK[i] - drop, sheet.frameK);
-        t.storage += cell * sheet.store;
+        t.storage += cell
+                * (sheet.store
+                        + LossTerm.Back.flux(sheet.soakWPerM2K, s.sheetK[i] - meanDrop + misfit[i], sheet.plenumK));
     }
 
     private double conductionLength(int cell) {
-        return SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.backWPerM2K);
+        return SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.behindWPerM2K);
     }
 
     /** Rate out of an end of the sheet, at the span's mean temperature there, W. */
@@ -243,7 +245,8 @@ final class Booking {
         double radiation = LossTerm.Radiation.flux(sheet.exchange, sheet.emissivity, ts, sheet.wallK);
         double back = LossTerm.Back.flux(sheet.backWPerM2K, metal, sheet.plenumK);
         double electrical = sheet.qe[c + 1];
-        double conduction = electrical - q - radiation - back - sheet.store;
+        double stored = sheet.store + LossTerm.Back.flux(sheet.soakWPerM2K, metal, sheet.plenumK);
+        double conduction = electrical - q - radiation - back - stored;
         double film = propertyTemperature(ts);
         double k = stream.conductivity(film);
         double re = get(In.SPEED) * x / stream.kinematicViscosity(film);
@@ -257,7 +260,7 @@ final class Booking {
         put(j, StationOut.Q_BACK, back);
         put(j, StationOut.Q_CONDUCTION, conduction);
         put(j, StationOut.Q_CONVECTION, q);
-        put(j, StationOut.Q_CONVECTION_LOCAL, localBalance(j, electrical, radiation, back));
+        put(j, StationOut.Q_CONVECTION_LOCAL, localBalance(j, electrical, radiation, back + stored));
         put(j, StationOut.H, h);
         put(j, StationOut.RE_X, re);
         put(j, StationOut.NU_X, h * x / k);
@@ -272,7 +275,7 @@ final class Booking {
     }
 
     /** q from the readings alone: electrical less booked losses and the three-point difference of neighbours. */
-    private double localBalance(int j, double electrical, double radiation, double back) {
+    private double localBalance(int j, double electrical, double radiation, double behind) {
         int last = model.stationJunction.length - 1;
         if (j == 0 || j == last || !used(model.stationJunction[j - 1]) || !used(model.stationJunction[j + 1])) {
             return Double.NaN;
@@ -286,6 +289,6 @@ final class Booking {
         double left = (in[layout.reading(b)] - in[layout.reading(a)]) / (xb - xa);
         double right = (in[layout.reading(c)] - in[layout.reading(b)]) / (xc - xb);
         double bend = (right - left) / (0.5 * (xc - xa));
-        return electrical - radiation - back - sheet.store + sheet.sheetWPerK * bend;
+        return electrical - radiation - behind + sheet.sheetWPerK * bend;
     }
 }

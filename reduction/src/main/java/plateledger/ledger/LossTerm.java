@@ -168,12 +168,39 @@ public sealed interface LossTerm
 
     /**
      * Heat stored in the sheet and, for a slow common drift, in a third of the insulation, METHODS.md eq. (L-7):
-     * q = (c_s t + c_f L_f/3) dT/dt. A third, since the temperature falls linearly to the plenum side.
+     * q = (c_s t + c_f L_f/3) dT/dt. A third, since the temperature falls linearly to the plenum side. After a start from
+     * cold the insulation also takes up heat while the sheet looks steady: its slowest mode, 2 U_b E (T − T_plenum) with
+     * E = a exp(−t/τ_f), τ_f = c_f L_f/(π² U_b) (slab with one face stepped and the other held: Carslaw and Jaeger, Conduction
+     * of Heat in Solids, 3.4, from memory), a = 1/(1 − τ_s/τ_f) for a sheet that itself approaches with τ_s.
      */
     record Storage() implements LossTerm {
         /** Heat capacity per area, J/(m² K). */
         public static double capacityJPerM2K(double sheetJPerM3K, double sheetM, double foamJPerM3K, double foamM) {
             return sheetJPerM3K * sheetM + foamJPerM3K * foamM / 3.0;
+        }
+
+        /** Conductance of what the insulation still takes up, W/(m² K). */
+        public static double soakWPerM2K(double backWPerM2K, double share) {
+            return 2.0 * backWPerM2K * share;
+        }
+
+        /**
+         * Mean of E over a window.
+         *
+         * @param backWPerM2K U_b, W/(m² K), above 0
+         * @param foamJPerM2K c_f L_f, J/(m² K), above 0
+         * @param sheetS τ_s of the sheet, s
+         * @param fromS window start since the heater was switched on, s; infinite for a plate long in balance
+         * @param toS window end since then, s
+         */
+        public static double soakShare(
+                double backWPerM2K, double foamJPerM2K, double sheetS, double fromS, double toS) {
+            if (Double.isInfinite(fromS)) {
+                return 0.0;
+            }
+            double tau = foamJPerM2K / (Math.PI * Math.PI * backWPerM2K);
+            double mean = tau * (Math.exp(-fromS / tau) - Math.exp(-toS / tau)) / (toS - fromS);
+            return mean / (1.0 - Math.min(0.5, sheetS / tau));
         }
 
         @Override
@@ -183,12 +210,12 @@ public sealed interface LossTerm
 
         @Override
         public String equation() {
-            return "q = (c_s t + c_f L_f/3) dT/dt   (L-7)";
+            return "q = (c_s t + c_f L_f/3) dT/dt + 2 U_b E (T − T_plenum)   (L-7)";
         }
 
         @Override
         public String source() {
-            return "slow-drift limit of one-dimensional conduction with the far face held";
+            return "one-dimensional conduction in the insulation with its far face held: slow drift and slowest mode";
         }
     }
 }

@@ -142,7 +142,7 @@ final class PlateSolver {
             if (!(s.surfaceSlope[cell] > 0.0)) {
                 return 0.0;
             }
-            double l = SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.backWPerM2K);
+            double l = SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.behindWPerM2K);
             return SpanProfile.edgeShare(sheet.edgeWPerMK, sheet.sheetWPerK, l, sheet.widthM)
                     * SpanProfile.meanShape(l, sheet.widthM);
         }
@@ -181,11 +181,11 @@ final class PlateSolver {
                         + dx[i]
                                 * (sheet.qe[i]
                                         - q
-                                        - LossTerm.Back.flux(sheet.backWPerM2K, t, sheet.plenumK)
+                                        - LossTerm.Back.flux(sheet.behindWPerM2K, t, sheet.plenumK)
                                         - sheet.store);
                 lower[i] = i > 0 ? -link[i] : 0.0;
                 upper[i] = i < n - 1 ? -link[i + 1] : 0.0;
-                pivot[i] = link[i] + link[i + 1] + dx[i] * (slope + sheet.backWPerM2K);
+                pivot[i] = link[i] + link[i + 1] + dx[i] * (slope + sheet.behindWPerM2K);
                 double dq = -dx[i] * shape[i] * (ts - adiabaticWallK) * damp;
                 rows[row + left] += w * dq;
                 rows[row + left + 1] += (1.0 - w) * dq;
@@ -351,7 +351,7 @@ final class PlateSolver {
 
         /** Share of (T₁ − T_frame) by which the edges lower the sheet at z in a cell. */
         private double edgeEffect(int cell, double z) {
-            double l = SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.backWPerM2K);
+            double l = SpanProfile.length(sheet.sheetWPerK, s.surfaceSlope[cell] + sheet.behindWPerM2K);
             return SpanProfile.edgeShare(sheet.edgeWPerMK, sheet.sheetWPerK, l, sheet.widthM)
                     * SpanProfile.shape(z, l, sheet.widthM);
         }

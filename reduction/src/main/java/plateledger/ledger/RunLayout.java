@@ -73,7 +73,9 @@ public final class RunLayout {
         /** Tail temperature. */
         TAIL_TEMPERATURE,
         /** Common drift of the sheet, K/s. */
-        DRIFT;
+        DRIFT,
+        /** Share E of the insulation's slowest mode still to come, METHODS.md eq. (L-7). */
+        SOAK;
 
         private static final In[] ALL = values();
     }

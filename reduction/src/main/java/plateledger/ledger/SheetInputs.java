@@ -13,6 +13,11 @@ final class SheetInputs {
     final double faceM2KPerW;
 
     final double backWPerM2K;
+    /** What the insulation still takes up, W/(m² K). */
+    final double soakWPerM2K;
+    /** Back and soak together, W/(m² K). */
+    final double behindWPerM2K;
+
     final double edgeWPerMK;
     final double noseWPerK;
     final double tailWPerK;
@@ -43,6 +48,8 @@ final class SheetInputs {
         faceM2KPerW = in[layout.at(In.COAT_THICKNESS)] / in[layout.at(In.COAT_CONDUCTIVITY)]
                 + in[layout.at(In.JUNCTION_DEPTH)] / conductivity;
         backWPerM2K = in[layout.at(In.BACK_CONDUCTANCE)];
+        soakWPerM2K = LossTerm.Storage.soakWPerM2K(backWPerM2K, in[layout.at(In.SOAK)]);
+        behindWPerM2K = backWPerM2K + soakWPerM2K;
         edgeWPerMK = in[layout.at(In.EDGE_CONDUCTANCE)];
         noseWPerK = in[layout.at(In.NOSE_CONDUCTANCE)];
         tailWPerK = in[layout.at(In.TAIL_CONDUCTANCE)];

@@ -140,6 +140,7 @@ final class HeatedStage {
                 lossStage >= 0 ? conductances.get(lossStage) : KernelInputs.prior(v, index), layout, in);
         double[] zero = zeroStage >= 0 ? offsets.get(zeroStage) : new double[0];
         KernelInputs.readings(v, index, layout, zero, in);
+        KernelInputs.soak(index, layout, in);
         return in;
     }
 }

@@ -89,6 +89,31 @@ final class KernelInputs {
         }
     }
 
+    /** What the insulation still takes up, from the time since the heater was switched on. */
+    static void soak(RunIndex run, RunLayout layout, double[] in) {
+        double flux = 0.0;
+        for (int j = 0; j < layout.strips(); j++) {
+            flux += in[layout.power(j)] - in[layout.lead(j)];
+        }
+        double sheet = 0.0;
+        int used = 0;
+        for (int t = 0; t < layout.junctions(); t++) {
+            if (run.used[t]) {
+                sheet += in[layout.reading(t)];
+                used++;
+            }
+        }
+        double area = (in[layout.at(In.HEATED_END)] - in[layout.at(In.HEATED_START)]) * in[layout.at(In.WIDTH)];
+        double perK = flux / area / (sheet / used - in[layout.at(In.AIR_TEMPERATURE)]);
+        double tau = in[layout.at(In.SHEET_HEAT_CAPACITY)] * in[layout.at(In.SHEET_THICKNESS)] / perK;
+        in[layout.at(In.SOAK)] = LossTerm.Storage.soakShare(
+                in[layout.at(In.BACK_CONDUCTANCE)],
+                in[layout.at(In.FOAM_HEAT_CAPACITY)] * in[layout.at(In.FOAM_THICKNESS)],
+                tau,
+                run.means.heatedFromS(),
+                run.means.heatedToS());
+    }
+
     /** Declared conductances in parameter order. */
     static double[] prior(Reads v, RunIndex run) {
         int[] at = run.panel.prior();

@@ -5,7 +5,6 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -90,7 +89,7 @@ final class WindowStage {
         SteadyWindow window = outcome.window().get();
         List<Finding> findings = new ArrayList<>();
         Set<String> lost = lost(run, logs, window, findings);
-        return new Outcome(Optional.of(window), Optional.of(means(logs, plate, window, lost)), "", findings);
+        return new Outcome(Optional.of(window), Optional.of(means(logs, plate, window, lost, power)), "", findings);
     }
 
     /** Fan-off zeros are short by nature: three minutes (design of the method), everything else as declared. */
@@ -295,12 +294,9 @@ final class WindowStage {
                         Level.CAUTION,
                         run.place(),
                         "run " + run.id() + ", channel " + name,
-                        String.format(
-                                Locale.ROOT,
-                                "%.0f %% of its samples in the window are not usable%s",
-                                100.0 * share,
-                                series == null ? "" : " (" + series.file() + ")"),
-                        String.format(Locale.ROOT, "at most %.0f %%", 100.0 * LOST_SHARE),
+                        "%.0f %% of its samples in the window are not usable%s"
+                                .formatted(100.0 * share, series == null ? "" : " (" + series.file() + ")"),
+                        "at most %.0f %%".formatted(100.0 * LOST_SHARE),
                         "It is left out of this run; repair it before the next.",
                         ""));
             }
@@ -308,7 +304,8 @@ final class WindowStage {
         return lost;
     }
 
-    private RunMeans means(RunLogs logs, Optional<Plate> plate, SteadyWindow window, Set<String> lost) {
+    private RunMeans means(
+            RunLogs logs, Optional<Plate> plate, SteadyWindow window, Set<String> lost, Optional<Series> power) {
         Map<String, Estimate> means = new LinkedHashMap<>();
         window.means().forEach((name, m) -> {
             if (!lost.contains(name) && !name.equals(POWER)) {
@@ -318,7 +315,29 @@ final class WindowStage {
         Estimate drift = plate.map(p -> drift(p, window, lost)).orElse(Estimate.of(0.0, 0.0));
         double[] covariance =
                 plate.map(p -> covariance(p, logs.series(), window)).orElse(new double[0]);
-        return new RunMeans(logs.run(), means, drift, covariance, 0.5 * (window.startS() + window.endS()));
+        double on = power.map(p -> switchedOn(p, window)).orElse(Double.NEGATIVE_INFINITY);
+        return new RunMeans(
+                logs.run(),
+                means,
+                drift,
+                covariance,
+                0.5 * (window.startS() + window.endS()),
+                window.startS() - on,
+                window.endS() - on);
+    }
+
+    /**
+     * When the heater was switched on, s: the first sample above half the window's power. A log that begins with the heater
+     * on cannot tell, so its first sample counts: the soak booked is then at most too large.
+     */
+    private static double switchedOn(Series power, SteadyWindow window) {
+        double level = 0.5 * window.mean(POWER).map(ChannelMean::mean).orElse(0.0);
+        for (int i = 0; i < power.size(); i++) {
+            if (power.values()[i] > level) {
+                return power.timesS()[i];
+            }
+        }
+        return power.timesS()[0];
     }
 
     /** Mean slope of the centre-line junctions; their errors are taken as common, since the room drives them together. */

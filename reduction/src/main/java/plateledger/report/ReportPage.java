@@ -23,10 +23,18 @@ import plateledger.fit.FitResult;
 import plateledger.reduce.CampaignResult;
 import plateledger.reduce.RunResult;
 import plateledger.reduce.RunState;
+import plateledger.safety.Cautions;
 
 /** {@code report.html}: the test report in one file, without scripts, with its own typeface and figures. */
 final class ReportPage {
     private static final Map<String, String> TITLE_FIELDS = titleFields();
+
+    private static final String DATA = "url(data:font/ttf;base64,";
+
+    /** Stand where a face goes once the page's characters are known. */
+    private static final String REGULAR_MARK = DATA + "@regular@)";
+
+    private static final String BOLD_MARK = DATA + "@bold@)";
 
     /** Findings of one kind and level that are shown in full; a stop always is. */
     private static final int SHOWN_OF_A_KIND = 6;
@@ -34,10 +42,11 @@ final class ReportPage {
     private final CampaignResult result;
     private final AuditRecord audit;
     private final List<Figures.Figure> figures;
-    private final List<String> cautions;
+    private final List<Cautions.Caution> cautions;
     private final List<RunGroup> groups;
 
-    ReportPage(CampaignResult result, AuditRecord audit, List<Figures.Figure> figures, List<String> cautions) {
+    ReportPage(
+            CampaignResult result, AuditRecord audit, List<Figures.Figure> figures, List<Cautions.Caution> cautions) {
         this.result = result;
         this.audit = audit;
         this.figures = List.copyOf(figures);
@@ -58,34 +67,33 @@ final class ReportPage {
         configuration.setWrapUncheckedExceptions(true);
         StringWriter page = new StringWriter();
         try {
-            Map<String, Object> model = model();
-            model.put("fonts", List.of());
-            // Twice: the typeface is cut down to the characters that the page turns out to use.
-            configuration.getTemplate("report.ftlh").process(model, page);
-            model.put("fonts", fonts(page.toString()));
-            page = new StringWriter();
-            configuration.getTemplate("report.ftlh").process(model, page);
+            configuration.getTemplate("report.ftlh").process(model(), page);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         } catch (TemplateException e) {
             throw new IllegalStateException("the report's template does not fit its data", e);
         }
-        return page.toString().getBytes(StandardCharsets.UTF_8);
+        return withTypeface(page.toString()).getBytes(StandardCharsets.UTF_8);
     }
 
-    private static List<Map<String, Object>> fonts(String page) {
-        return List.of(face("DejaVuSans.ttf", "normal", 400, page), face("DejaVuSans-Bold.ttf", "normal", 700, page));
-    }
-
-    private static Map<String, Object> face(String file, String style, int weight, String page) {
-        byte[] subset = FontSubset.of(Fonts.bytes(file), page);
-        return Map.of(
-                "style", style, "weight", weight, "data", Base64.getEncoder().encodeToString(subset));
+    /** Puts the typeface in, cut down to the characters that the page turned out to use. */
+    private static String withTypeface(String page) {
+        String complete = page;
+        for (Map.Entry<String, String> face : Map.of(REGULAR_MARK, "DejaVuSans.ttf", BOLD_MARK, "DejaVuSans-Bold.ttf")
+                .entrySet()) {
+            byte[] cut = FontSubset.of(Fonts.bytes(face.getValue()), page);
+            complete =
+                    complete.replace(face.getKey(), DATA + Base64.getEncoder().encodeToString(cut) + ")");
+        }
+        return complete;
     }
 
     private Map<String, Object> model() throws IOException {
         Campaign campaign = result.campaign();
         Map<String, Object> model = new LinkedHashMap<>();
+        model.put(
+                "fonts",
+                List.of(Map.of("weight", 400, "data", REGULAR_MARK), Map.of("weight", 700, "data", BOLD_MARK)));
         model.put("css", css());
         model.put("title", campaign.title());
         model.put("rig", campaign.rig().title());
@@ -114,7 +122,12 @@ final class ReportPage {
         model.put("windows", RunSections.windows(result));
         model.put("clocks", RunSections.clocks(campaign));
         model.put("findings", findings());
-        model.put("cautions", cautions);
+        model.put(
+                "cautions",
+                cautions.stream()
+                        .map(c -> Map.of("topic", c.topic(), "text", c.text(), "source", c.source()))
+                        .toList());
+        model.put("notAProof", Cautions.NOT_A_PROOF);
         model.put("deviations", RunSections.deviations(result));
         model.put("notUsed", RunSections.notUsed(result));
         model.put("audit", auditTable());

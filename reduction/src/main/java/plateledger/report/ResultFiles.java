@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.List;
 import plateledger.audit.AuditRecord;
 import plateledger.reduce.CampaignResult;
+import plateledger.safety.Cautions;
 
 /** All files of one reduction. The same result and audit give the same bytes, {@code written.json} excepted. */
 public final class ResultFiles {
@@ -49,7 +50,7 @@ public final class ResultFiles {
                     "figures/" + figure.name() + ".svg",
                     SvgDrawing.standalone(figure.svg()).getBytes(StandardCharsets.UTF_8)));
         }
-        files.add(new ResultFile("report.html", new ReportPage(result, audit, figures, GeneralCautions.LIST).bytes()));
+        files.add(new ResultFile("report.html", new ReportPage(result, audit, figures, Cautions.general()).bytes()));
         return files;
     }
 }

@@ -14,7 +14,7 @@ import java.util.function.DoubleConsumer;
 import java.util.function.IntConsumer;
 
 /**
- * Propagation of uncertainty through a {@link CompositeModel}, METHODS.md eq. (U-2).
+ * Propagation of uncertainty through a {@link CompositeModel}, METHODS.md eq. (U-7).
  *
  * <pre>
  *   δa_ij = [a_j(x_i + u_i) − a_j(x_i − u_i)]/2         what input i does to argument j

@@ -2,6 +2,7 @@ package plateledger.gui.app;
 
 import java.awt.AWTError;
 import java.awt.GraphicsEnvironment;
+import java.util.Optional;
 import plateledger.cli.CommandLineProgram;
 
 /** Start of the program: with arguments the command line, without any the desktop window. */
@@ -22,7 +23,7 @@ public final class Main {
         if (!hasDisplay()) {
             System.exit(CommandLineProgram.run());
         }
-        System.exit(CommandLineProgram.run());
+        DesktopProgram.open(Optional.empty());
     }
 
     /** True if a window can be opened; a display that is named but does not answer counts as none. */

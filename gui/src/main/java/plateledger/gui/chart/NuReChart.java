@@ -11,6 +11,8 @@ import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.DeviationRenderer;
 import org.jfree.chart.renderer.xy.XYErrorRenderer;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
+import org.jfree.chart.title.TextTitle;
+import org.jfree.chart.ui.HorizontalAlignment;
 import org.jfree.data.xy.XYIntervalSeries;
 import org.jfree.data.xy.XYIntervalSeriesCollection;
 import org.jfree.data.xy.XYSeries;
@@ -48,7 +50,17 @@ public final class NuReChart {
         theory(plot, numbers.groups(), look);
         ring(plot, numbers, chosenRun, look);
         runs(plot, numbers.groups(), look);
-        return PlotFrame.chart(plot, look);
+        JFreeChart chart = PlotFrame.chart(plot, look);
+        chart.addSubtitle(0, form(numbers.form(), look));
+        return chart;
+    }
+
+    private static TextTitle form(String words, ChartLook look) {
+        TextTitle title = new TextTitle(words, look.small());
+        title.setPaint(look.line());
+        title.setHorizontalAlignment(HorizontalAlignment.LEFT);
+        title.setPadding(2, 6, 2, 0);
+        return title;
     }
 
     private static void band(XYPlot plot, List<Curve> fits, ChartLook look) {
@@ -115,7 +127,7 @@ public final class NuReChart {
         renderer.setErrorPaint(look.thinned(0.75));
         renderer.setErrorStroke(PlotFrame.line(1f));
         for (int g = 0; g < groups.size(); g++) {
-            XYIntervalSeries series = new XYIntervalSeries(groups.get(g).name() + ", 95 %", false, true);
+            XYIntervalSeries series = new XYIntervalSeries(groups.get(g).name(), false, true);
             for (Point p : groups.get(g).points()) {
                 double reU = known(p.reU());
                 double nuU = known(p.nuU());

@@ -113,18 +113,26 @@ public final class PlateChart {
 
         XYIntervalSeries convection = new XYIntervalSeries("interval of convection");
         stations.forEach(s -> add(convection, s.xMm(), s.part(HeatPart.CONVECTION), s.partU(HeatPart.CONVECTION)));
-        XYErrorRenderer interval = marks(0, 1.0, look.line(), look);
-        interval.setSeriesShapesVisible(0, false);
-        interval.setSeriesVisibleInLegend(0, false);
-        layer(plot, 1, collection(convection), interval);
+        // Drawn twice, wide in the colour of the ground below: half of each bar lies on a dark column.
+        layer(plot, 1, collection(convection), interval(look.ground(), 3.2f, look));
+        layer(plot, 2, collection(convection), interval(look.line(), 1.1f, look));
 
         XYLineAndShapeRenderer heater = new XYLineAndShapeRenderer(true, false);
         heater.setSeriesPaint(0, look.line());
         heater.setSeriesStroke(0, PlotFrame.line(1.8f));
         heater.setDefaultToolTipGenerator(
                 (data, series, item) -> "heater flux " + NumberText.plain(data.getYValue(series, item)) + " W/m²");
-        layer(plot, 2, new XYSeriesCollection(heaterFlux(profile, stations)), heater);
+        layer(plot, 3, new XYSeriesCollection(heaterFlux(profile, stations)), heater);
         return plot;
+    }
+
+    private static XYErrorRenderer interval(Color colour, float width, ChartLook look) {
+        XYErrorRenderer interval = marks(0, 1.0, colour, look);
+        interval.setErrorPaint(colour);
+        interval.setErrorStroke(PlotFrame.line(width));
+        interval.setSeriesShapesVisible(0, false);
+        interval.setSeriesVisibleInLegend(0, false);
+        return interval;
     }
 
     /** The renderer goes in first: the library asks a data set's range of whatever renderer it finds. */

@@ -18,8 +18,12 @@ import plateledger.reduce.RunResult;
  *
  * @param groups runs of one plate and regime, in campaign order
  * @param fits fitted curves
+ * @param form the form of the fits with the exponent of Pr, and what intervals are shown
  */
-public record NuRe(List<Group> groups, List<Curve> fits) {
+public record NuRe(List<Group> groups, List<Curve> fits, String form) {
+    /** Nothing to draw. */
+    public static final NuRe NOTHING = new NuRe(List.of(), List.of(), "");
+
     private static final int CURVE_POINTS = 41;
 
     /**
@@ -58,7 +62,7 @@ public record NuRe(List<Group> groups, List<Curve> fits) {
     /**
      * A fitted curve over the range of Re of its points.
      *
-     * @param name the form with its constants
+     * @param name the fit with its constants
      * @param re Reynolds numbers
      * @param nu curve
      * @param low lower limit of its 95 % band
@@ -89,7 +93,12 @@ public record NuRe(List<Group> groups, List<Curve> fits) {
                 result.fits().stream()
                         .filter(fit -> !fit.problem().points().isEmpty())
                         .map(NuRe::curve)
-                        .toList());
+                        .toList(),
+                result.fits().isEmpty()
+                        ? "Bars: 95 %"
+                        : "Fits: Nu = C·Reᵐ·Pr%s, with 95 %% band. Bars: 95 %%"
+                                .formatted(
+                                        exponent(result.campaign().definitions().prandtlExponent())));
     }
 
     /** True if there is nothing to draw. */
@@ -131,10 +140,9 @@ public record NuRe(List<Group> groups, List<Curve> fits) {
     private static String name(FitResult fit) {
         Constants c = fit.twoStep();
         double k = fit.coverageFactor();
-        return "fit %s: Nu = C·Reᵐ·Pr%s, C = %s, m = %s"
+        return "fit %s: C = %s, m = %s"
                 .formatted(
                         fit.problem().id(),
-                        exponent(fit.problem().prandtlExponent()),
                         NumberText.withInterval(c.c(), c.c() * k * c.uLnC()),
                         NumberText.withInterval(c.m(), k * c.uM()));
     }

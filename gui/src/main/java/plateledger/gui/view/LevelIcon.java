@@ -12,9 +12,9 @@ import javax.swing.Icon;
 import plateledger.finding.Level;
 import plateledger.report.Palette;
 
-/** The shape of a finding's level: an octagon, a triangle, a disc, an open ring. The colour only supports the shape. */
+/** The shape of a finding's level: a square, a triangle, a disc, an open ring. The colour only supports the shape. */
 public record LevelIcon(Level level, int size) implements Icon {
-    private static final int OCTAGON = 8;
+    private static final int SQUARE = 4;
     private static final int TRIANGLE = 3;
 
     @Override
@@ -46,7 +46,7 @@ public record LevelIcon(Level level, int size) implements Icon {
     private Shape shape() {
         double r = size / 2.0 - 1.0;
         return switch (level) {
-            case STOP -> polygon(OCTAGON, r, Math.PI / OCTAGON, 0.0);
+            case STOP -> polygon(SQUARE, 1.15 * r, Math.PI / SQUARE, 0.0);
             case CAUTION -> polygon(TRIANGLE, 1.1 * r, -Math.PI / 2.0, 0.2 * r);
             case NOTE, NOT_CHECKED -> new Ellipse2D.Double(-0.8 * r, -0.8 * r, 1.6 * r, 1.6 * r);
         };

@@ -15,7 +15,7 @@ public final class NuRePanel {
     private static final double NEAR_PX = 12.0;
 
     private final ChartPane chart;
-    private NuRe shown = new NuRe(java.util.List.of(), java.util.List.of());
+    private NuRe shown = NuRe.NOTHING;
 
     /** An empty chart. */
     public NuRePanel(Gestures gestures) {
@@ -35,9 +35,7 @@ public final class NuRePanel {
 
     /** Shows the runs of a state. */
     public void render(WindowState state, ChartLook look) {
-        shown = state.shown()
-                .map(s -> NuRe.of(s.result()))
-                .orElseGet(() -> new NuRe(java.util.List.of(), java.util.List.of()));
+        shown = state.shown().map(s -> NuRe.of(s.result())).orElse(NuRe.NOTHING);
         ChartLook drawn = state.freshness() == Freshness.FORMER ? look.former() : look;
         chart.show(
                 shown.isEmpty() ? Optional.empty() : Optional.of(NuReChart.of(shown, state.chosenRun(), drawn)), look);

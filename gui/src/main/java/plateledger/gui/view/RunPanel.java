@@ -21,7 +21,7 @@ import plateledger.reduce.RunResult;
 public final class RunPanel {
     private final JPanel root = new JPanel(new MigLayout("ins 0, gap 0 4, fill", "[grow,fill]", "[][][grow,fill]"));
     private final JLabel title = new JLabel(" ");
-    private final JPanel facts = new JPanel(new MigLayout("ins 0, gap 16 1, wrap 4", "", "[baseline][baseline]"));
+    private final JPanel facts = new JPanel(new MigLayout("ins 0, gap 10 1, wrap 4", "", "[baseline][baseline]"));
     private final ChartPane chart;
 
     /** An empty panel. */
@@ -60,6 +60,7 @@ public final class RunPanel {
                 JLabel label = new JLabel(fact.symbol().isEmpty() ? fact.text() : html(fact));
                 label.setToolTipText(fact.meaning());
                 label.setForeground(ink);
+                label.setFont(label.getFont().deriveFont(label.getFont().getSize2D() - 1f));
                 facts.add(label, fact.symbol().isEmpty() ? "span, wmin 0" : "");
             }
         } else {

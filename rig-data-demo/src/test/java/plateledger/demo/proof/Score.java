@@ -47,6 +47,11 @@ final class Score {
         return sumError / n;
     }
 
+    /** Mean of error ÷ u. */
+    double meanZ() {
+        return sumZ / n;
+    }
+
     /** Root mean square of error ÷ u. */
     double rmsZ() {
         return Math.sqrt(sumZ2 / n);
@@ -72,7 +77,8 @@ final class Score {
                 sdZ());
     }
 
-    static final String HEAD =
-            "| quantity | n | 95 % interval holds | too low | too high | mean error | sd(error/u) |\n"
-                    + "| --- | --- | --- | --- | --- | --- | --- |\n";
+    static final String HEAD = """
+            | quantity | n | 95 % interval holds | too low | too high | mean error | sd(error/u) |
+            | --- | --- | --- | --- | --- | --- | --- |
+            """;
 }

@@ -38,7 +38,7 @@ final class Simulated {
             m.mean()
                     .forEach((channel, value) -> means.put(
                             channel, Estimate.of(value, m.standardError().getOrDefault(channel, 0.0))));
-            out.add(new plateledger.reduce.RunMeans(
+            out.add(plateledger.reduce.RunMeans.balanced(
                     run,
                     means,
                     Estimate.of(m.plateSlopeKPerS(), m.plateSlopeStandardError()),
