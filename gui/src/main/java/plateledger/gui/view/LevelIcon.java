@@ -1,7 +1,9 @@
 package plateledger.gui.view;
 
 import java.awt.BasicStroke;
+import java.awt.Color;
 import java.awt.Component;
+import java.awt.Font;
 import java.awt.Graphics;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
@@ -10,11 +12,13 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
 import javax.swing.Icon;
 import plateledger.finding.Level;
+import plateledger.gui.chart.ChartLook;
 import plateledger.report.Palette;
 
-/** The shape of a finding's level: a square, a triangle, a disc, an open ring. The colour only supports the shape. */
+/** The shape of a finding's level: a square, a triangle, a disc, an open diamond. The colour only supports the shape. */
 public record LevelIcon(Level level, int size) implements Icon {
     private static final int SQUARE = 4;
+    private static final int MIDDLE = 3 * 128; // of the sum of red, green and blue
     private static final int TRIANGLE = 3;
 
     @Override
@@ -34,7 +38,7 @@ public record LevelIcon(Level level, int size) implements Icon {
         g.translate(x + size / 2.0, y + size / 2.0);
         Shape shape = shape();
         if (level != Level.NOT_CHECKED) {
-            g.setColor(Palette.of(level));
+            g.setColor(fill(on.getForeground(), on.getFont()));
             g.fill(shape);
         }
         g.setColor(on.getForeground());
@@ -43,12 +47,19 @@ public record LevelIcon(Level level, int size) implements Icon {
         g.dispose();
     }
 
+    /** Light letters mean a dark ground, on which the palette is lightened as in the charts. */
+    private Color fill(Color letters, Font font) {
+        boolean darkGround = letters.getRed() + letters.getGreen() + letters.getBlue() > MIDDLE;
+        return (darkGround ? ChartLook.dark(font) : ChartLook.light(font)).of(Palette.of(level));
+    }
+
     private Shape shape() {
         double r = size / 2.0 - 1.0;
         return switch (level) {
             case STOP -> polygon(SQUARE, 1.15 * r, Math.PI / SQUARE, 0.0);
             case CAUTION -> polygon(TRIANGLE, 1.1 * r, -Math.PI / 2.0, 0.2 * r);
-            case NOTE, NOT_CHECKED -> new Ellipse2D.Double(-0.8 * r, -0.8 * r, 1.6 * r, 1.6 * r);
+            case NOT_CHECKED -> polygon(SQUARE, r, 0.0, 0.0);
+            case NOTE -> new Ellipse2D.Double(-0.8 * r, -0.8 * r, 1.6 * r, 1.6 * r);
         };
     }
 
