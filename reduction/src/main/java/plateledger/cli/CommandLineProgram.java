@@ -57,7 +57,18 @@ public final class CommandLineProgram {
             terminal.out().flush();
             return ExitStatus.DONE;
         }
-        return line.execute(args);
+        try {
+            return line.execute(args);
+        } catch (Error fault) { // exceptions are told by the handler below
+            return tell(terminal, fault);
+        }
+    }
+
+    private static int tell(Terminal terminal, Throwable fault) {
+        terminal.err().print("Fault in the program: ");
+        fault.printStackTrace(terminal.err());
+        terminal.err().println("Please report this with the lines above. Results are written whole or not at all.");
+        return ExitStatus.FAULT;
     }
 
     /** The commands with their options; for help and completion too. */
@@ -79,14 +90,7 @@ public final class CommandLineProgram {
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.getCommandSpec().version("plateledger " + Program.versionOnly());
         line.getCommandSpec().exitCodeOnInvalidInput(ExitStatus.NOTHING_WRITTEN);
-        line.setExecutionExceptionHandler((e, command, parsed) -> {
-            terminal.err().println("Fault in the program: " + e);
-            for (StackTraceElement frame : e.getStackTrace()) {
-                terminal.err().println("    at " + frame);
-            }
-            terminal.err().println("Please report this with the lines above; nothing was written.");
-            return ExitStatus.FAULT;
-        });
+        line.setExecutionExceptionHandler((fault, command, parsed) -> tell(terminal, fault));
         for (CommandLine sub : line.getSubcommands().values()) {
             sub.getCommandSpec().exitCodeOnExecutionException(ExitStatus.FAULT);
         }

@@ -113,7 +113,11 @@ final class Oddities {
                     Level.NOTE,
                     new Place(file, lines[cadence.firstGap()], 0),
                     "time",
-                    String.format(Locale.ROOT, "%d gaps, the longest %.1f s", cadence.gaps(), cadence.longestGapS()),
+                    String.format(
+                            Locale.ROOT,
+                            cadence.gaps() == 1 ? "%d gap of %.1f s" : "%d gaps, the longest %.1f s",
+                            cadence.gaps(),
+                            cadence.longestGapS()),
                     String.format(Locale.ROOT, "steps of about %.3g s", cadence.intervalS()),
                     "Nothing is filled in; means use the samples there are.");
         }

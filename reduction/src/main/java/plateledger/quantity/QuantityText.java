@@ -260,7 +260,7 @@ public final class QuantityText {
                         dimension.word() + " in one of: " + dimension.units(),
                         unit == Unit.CELSIUS && dimension == Dimension.TEMPERATURE_DIFFERENCE
                                 ? "A difference of temperatures is written in K."
-                                : "");
+                                : example(dimension));
             }
             return unit;
         }

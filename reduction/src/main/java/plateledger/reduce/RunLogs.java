@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.Logger;
 import plateledger.campaign.Run;
@@ -76,7 +77,8 @@ record RunLogs(Run run, List<LogData> logs, Map<String, Series> series, List<Fin
             }
         }
         if (refusals.isEmpty()) {
-            missing(campaign, run, series, refusals);
+            missing(campaign, run, logs, series).ifPresent(refusals::add);
+            LogOverlap.missing(run, series.values(), campaign.zone()).ifPresent(refusals::add);
         }
         if (!refusals.isEmpty()) {
             throw new RefusedException(refusals);
@@ -84,21 +86,32 @@ record RunLogs(Run run, List<LogData> logs, Map<String, Series> series, List<Fin
         return new RunLogs(run, logs, series, findings);
     }
 
-    private static void missing(Campaign campaign, Run run, Map<String, Series> series, List<Finding> refusals) {
-        for (String channel : ExpectedChannels.of(campaign, run)) {
-            if (!series.containsKey(channel)) {
-                refusals.add(new Finding(
-                        "LOG-CHANNEL-MISSING",
-                        Level.STOP,
-                        run.place(),
-                        "run " + run.id() + ", channel " + channel,
-                        "no column of that name in "
-                                + String.join(", ", run.logs().values()),
-                        "a column for every channel that the rig file names",
-                        "Correct the name in rig.toml, or map the column's title under [logger.<id>] columns.",
-                        ""));
-            }
+    /** One finding for all channels that no column holds, with the columns that no channel takes: one may be the other. */
+    private static Optional<Finding> missing(
+            Campaign campaign, Run run, List<LogData> logs, Map<String, Series> series) {
+        List<String> missing = ExpectedChannels.of(campaign, run).stream()
+                .filter(channel -> !series.containsKey(channel))
+                .toList();
+        if (missing.isEmpty()) {
+            return Optional.empty();
         }
+        String unclaimed = logs.stream()
+                .flatMap(log -> log.series().stream())
+                .filter(s -> campaign.rig().instrumentOf(s.channel()).isEmpty())
+                .map(s -> "\"" + s.channel() + "\" in " + s.file())
+                .collect(Collectors.joining(", "));
+        boolean one = missing.size() == 1;
+        return Optional.of(new Finding(
+                "LOG-CHANNEL-MISSING",
+                Level.STOP,
+                run.place(),
+                "run " + run.id() + (one ? ", channel " : ", channels ") + String.join(", ", missing),
+                "no column of " + (one ? "that name" : "those names") + " in "
+                        + String.join(", ", run.logs().values())
+                        + (unclaimed.isEmpty() ? "" : "; columns of no channel: " + unclaimed),
+                "a column for every channel that rig.toml names",
+                "Correct the name in rig.toml, or map the column's title under [logger.<id>] columns.",
+                ""));
     }
 
     /** Times from logger to true time; values through the calibration polynomial. */

@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -294,9 +295,12 @@ final class WindowStage {
                         Level.CAUTION,
                         run.place(),
                         "run " + run.id() + ", channel " + name,
-                        "%.0f %% of its samples in the window are not usable%s"
-                                .formatted(100.0 * share, series == null ? "" : " (" + series.file() + ")"),
-                        "at most %.0f %%".formatted(100.0 * LOST_SHARE),
+                        String.format(
+                                Locale.ROOT,
+                                "%.0f %% of its samples in the window are not usable%s",
+                                100.0 * share,
+                                series == null ? "" : " (" + series.file() + ")"),
+                        String.format(Locale.ROOT, "at most %.0f %%", 100.0 * LOST_SHARE),
                         "It is left out of this run; repair it before the next.",
                         ""));
             }

@@ -1,6 +1,9 @@
 package plateledger.report;
 
 import java.io.IOException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.LinkOption;
 import java.nio.file.Path;
@@ -120,6 +123,9 @@ public final class OutputFolder {
             RefusedException why = explain(e, files);
             deleteIfPossible(fresh);
             throw why;
+        } catch (RuntimeException | Error fault) {
+            deleteIfPossible(fresh);
+            throw fault;
         }
         boolean hadFormer = Files.exists(target, LinkOption.NOFOLLOW_LINKS);
         try {
@@ -196,10 +202,24 @@ public final class OutputFolder {
     private RefusedException notWritable(IOException e) {
         return refused(
                 "OUT-NOT-WRITABLE",
-                "it cannot be written: " + e.getClass().getSimpleName() + ": " + e.getMessage(),
+                "it cannot be written: " + reason(e),
                 "a folder that may be made and written",
                 "Give yourself the right to write there, or name another place with --out. Earlier results are as they"
                         + " were.");
+    }
+
+    /** What the system says, in words: some of its messages are a bare path. */
+    private static String reason(IOException e) {
+        if (e instanceof FileSystemException place && place.getFile() != null) {
+            String why = place.getReason();
+            String words = e instanceof AccessDeniedException
+                    ? "access denied"
+                    : e instanceof FileAlreadyExistsException
+                            ? "a file is in the way"
+                            : why == null ? e.getClass().getSimpleName() : why;
+            return words + " (" + place.getFile() + ")";
+        }
+        return String.valueOf(e.getMessage());
     }
 
     private RefusedException refused(String id, String found, String expected, String remedy) {

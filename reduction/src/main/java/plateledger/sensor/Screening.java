@@ -125,8 +125,8 @@ public final class Screening {
                     Level.CAUTION,
                     series,
                     first,
-                    String.format(Locale.ROOT, "%d readings out of range, the first %.6g (SI)", n, v[first]),
-                    String.format(Locale.ROOT, "%.6g to %.6g (SI)", instrument.rangeLow(), instrument.rangeHigh()),
+                    counted(n, "reading") + " out of range, the first " + si(series, v[first]),
+                    si(series, instrument.rangeLow()) + " to " + si(series, instrument.rangeHigh()),
                     "They are left out; check the sensor and its wiring."));
         }
     }
@@ -152,12 +152,8 @@ public final class Screening {
                     Level.CAUTION,
                     series,
                     first,
-                    String.format(
-                            Locale.ROOT,
-                            "%d readings stuck, up to %d in a row at %.6g (SI)",
-                            n,
-                            longest,
-                            series.values()[first]),
+                    counted(n, "reading") + " stuck, up to " + longest + " in a row at "
+                            + si(series, series.values()[first]),
                     "runs of equal readings shorter than " + limit,
                     "They are left out; check the sensor and the logger's channel."));
         }
@@ -174,11 +170,20 @@ public final class Screening {
                     Level.NOTE,
                     series,
                     spikes[0],
-                    String.format(
-                            Locale.ROOT, "%d spikes, the first %.6g (SI)", spikes.length, series.values()[spikes[0]]),
+                    counted(spikes.length, "spike") + ", the first " + si(series, series.values()[spikes[0]]),
                     "readings near those before and after",
                     "They are left out."));
         }
+    }
+
+    private static String counted(int n, String what) {
+        return n + " " + what + (n == 1 ? "" : "s");
+    }
+
+    /** A value in the channel's SI unit. */
+    private static String si(Series series, double value) {
+        return String.format(Locale.ROOT, "%.6g", value)
+                + (series.unit().isEmpty() || series.unit().equals("1") ? "" : " " + series.unit());
     }
 
     private static int count(byte[] flags, Series.Flag flag) {

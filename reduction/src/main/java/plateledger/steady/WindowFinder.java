@@ -170,11 +170,11 @@ public final class WindowFinder {
                 .limit(4)
                 .map(e -> String.format(
                         Locale.ROOT,
-                        "%s of %s %.3g %s (limit %.3g)",
+                        "%s of %s %.3g%s (limit %.3g)",
                         e.test(),
                         e.subject(),
                         e.value(),
-                        e.unit(),
+                        e.unit().equals("1") ? "" : " " + e.unit(),
                         e.limit()))
                 .collect(Collectors.joining("; "));
         return new WindowOutcome(Optional.empty(), evidence, "no steady window; at the end of the run: " + failed);
