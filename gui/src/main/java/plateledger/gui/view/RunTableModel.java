@@ -15,12 +15,12 @@ final class RunTableModel implements TableModel {
     /** The columns, in order. */
     enum Column {
         RUN("Run", 42, "run", String.class),
-        KIND("Plate or type", 132, "plate and regime of a heated run, else the type of run", String.class),
-        STATE("State", 72, "what became of the run", String.class),
-        SET("Set", 44, "set point; runs of one set point are repeats", String.class),
+        KIND("Plate or type", 130, "plate and regime of a heated run, else the type of run", String.class),
+        STATE("State", 84, "what became of the run", String.class),
+        SET("Set", 42, "set point; runs of one set point are repeats", String.class),
         SPEED("U, m/s", 52, "stream speed over the plate, m/s", RunRow.Cell.class),
         POWER("Q, W", 56, "electrical power, W", RunRow.Cell.class),
-        NUSSELT("Nu ± U", 96, "Nusselt number of the run average, 95 % interval", RunRow.Cell.class),
+        NUSSELT("Nu ± U", 92, "Nusselt number of the run average, 95 % interval", RunRow.Cell.class),
         FINDINGS("Findings", 60, "findings that belong to the run", Integer.class);
 
         private static final List<Column> ALL = List.of(values());
