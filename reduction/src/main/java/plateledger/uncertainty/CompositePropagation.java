@@ -111,7 +111,8 @@ public final class CompositePropagation {
         double[] down = best.clone();
         up[input] = best[input] + step;
         down[input] = best[input] - step;
-        double taken = (up[input] - down[input]) / (2.0 * step); // after rounding
+        double raised = (up[input] - best[input]) / step; // after rounding
+        double lowered = (best[input] - down[input]) / step;
         CompositeModel.At above = model.at(up);
         CompositeModel.At below = model.at(down);
         for (int b : model.blocksOf(input)) {
@@ -120,7 +121,7 @@ public final class CompositePropagation {
             above.arguments(b, high);
             below.arguments(b, low);
             for (int j = 0; j < high.length; j++) {
-                high[j] = 0.5 * (high[j] - low[j]) / taken;
+                high[j] = effect(centre[b][j], high[j], low[j], raised, lowered);
             }
             moves[b][Arrays.binarySearch(reach[b], input)] = high;
         }
@@ -137,7 +138,7 @@ public final class CompositePropagation {
             if (cancelled.getAsBoolean()) {
                 throw new CancellationException("propagation cancelled");
             }
-            if (step[j] > 0.0) {
+            if (step[j] != 0.0) { // NaN too: an argument without a value makes the outputs' uncertainty unknown
                 perturb(b, j, step[j], value, gain, bend);
             }
         }
