@@ -51,7 +51,8 @@ final class Repeats {
                 .orElse(MIDDLE_SLOPE);
     }
 
-    private static RepeatSpread spread(String plate, String set, List<FitPoint> points, double m, double n) {
+    /** One set point: ln(Nu/Pr^n) − m ln Re of each point, its standard deviation and what the random parts predict. */
+    static RepeatSpread spread(String plate, String set, List<FitPoint> points, double m, double n) {
         double[] y = points.stream()
                 .mapToDouble(p -> Math.log(p.nu()) - n * Math.log(p.pr()) - m * Math.log(p.re()))
                 .toArray();

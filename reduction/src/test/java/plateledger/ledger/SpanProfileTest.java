@@ -22,8 +22,7 @@ final class SpanProfileTest {
         assertEquals(1.0, SpanProfile.shape(0.15, l, 0.3), 1e-15);
         assertEquals(0.99505475 / 3.0, SpanProfile.meanShape(l, 0.3), 1e-8);
         // ½ sech²3 + tanh 3/6
-        assertEquals(
-                0.5 / (10.067662 * 10.067662) + 0.99505475 / 6.0, SpanProfile.meanSquareShape(l, 0.3), 1e-8);
+        assertEquals(0.5 / (10.067662 * 10.067662) + 0.99505475 / 6.0, SpanProfile.meanSquareShape(l, 0.3), 1e-8);
     }
 
     @Test
