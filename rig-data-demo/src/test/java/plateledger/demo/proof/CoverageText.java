@@ -53,12 +53,13 @@ final class CoverageText {
                 .append(" campaigns on window means\n\n");
         text.append(exact.table(false)).append('\n');
         lack(text, exact);
-        bent.run(FIRST_SEED + 1_000_000L, Math.max(1, campaigns / 2));
+        save(file, text);
+        bent.run(FIRST_SEED + 1_000_000L, Math.max(1, campaigns / 5));
         text.append(String.format(
                 Locale.ROOT,
                 "## The same with a truth bent by %.0f %% in the log–log plane, %d campaigns%n%n",
                 100.0 * bend,
-                Math.max(1, campaigns / 2)));
+                Math.max(1, campaigns / 5)));
         text.append("All campaigns:\n\n").append(bent.table(false)).append('\n');
         lack(text, bent);
         if (bent.cWhenQuiet.count() > 1) {
@@ -66,9 +67,15 @@ final class CoverageText {
                     .append(bent.table(true))
                     .append('\n');
         }
+        save(file, text);
         if (folders > 0) {
             fullLogs(text);
         }
+        save(file, text);
+    }
+
+    /** Saved after each part, so that a run cut short leaves what it has. */
+    private static void save(Path file, StringBuilder text) throws IOException {
         Files.writeString(file, text.toString().replace("\r\n", "\n"), StandardCharsets.UTF_8);
     }
 
