@@ -4,6 +4,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import plateledger.campaign.RunType;
 import plateledger.fluid.FormulationUncertainty;
 import plateledger.quantity.Estimate;
 import plateledger.quantity.Stated;
@@ -73,15 +74,25 @@ final class InputBook {
         boolean bath = !i.bath().isEmpty();
         Scope wide = bath ? Scope.bath(i.bath()) : Scope.instrument(i.id());
         Scope own = Scope.instrument(i.id() + "/" + channel);
-        String day = run.run().day();
         return Optional.of(new Signal(
                 mean(run.run().id(), channel, mean),
                 stated((bath ? "bath " + i.bath() : i.id()) + ".offset", i.offset(), wide),
                 stated(channel + ".offset", i.channelOffset(), own),
                 stated(i.id() + ".gain", i.gain(), Scope.instrument(i.id())),
                 stated(channel + ".gain", i.channelGain(), own),
-                stated(day + "/" + channel + ".drift", i.dailyDrift(), Scope.day(day)),
+                drift(run, channel, i),
                 i.gainOrigin()));
+    }
+
+    /**
+     * A temperature's drift counts from the day's zero run, so that run itself has none: taken there too, the drift of the
+     * air channel would cancel between zero and heated run, which it does not.
+     */
+    private int drift(RunMeans run, String channel, Instrument i) {
+        String day = run.run().day();
+        return run.run().type() == RunType.ZERO && i.kind() == Instrument.SignalKind.TEMPERATURE
+                ? normal("at zero/" + channel + ".drift", 0.0, 0.0, Scope.day(day))
+                : stated(day + "/" + channel + ".drift", i.dailyDrift(), Scope.day(day));
     }
 
     /** Those of the channels that were read in a run. */
