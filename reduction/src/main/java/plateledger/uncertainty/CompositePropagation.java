@@ -23,10 +23,13 @@ import java.util.function.IntConsumer;
  *   c_i u_i = Σ_j g_j δa_ij/s_j
  * </pre>
  *
- * <p>Exact to second order, as plain central perturbation of the inputs is; the numbers of calls of the dear step is twice
+ * <p>Exact to second order, as plain central perturbation of the inputs is; the number of calls of the dear step is twice
  * the number of arguments, whatever the number of inputs. The result does not depend on the number of threads.
  */
 public final class CompositePropagation {
+    /** Smallest step in spacings of floating-point numbers, so that a tiny u still moves the argument. */
+    private static final double FLOOR_ULPS = 64.0;
+
     private final CompositeModel model;
     private final InputList inputs;
     private final double[] best;
@@ -70,6 +73,11 @@ public final class CompositePropagation {
                 .toArray(int[][]::new);
     }
 
+    /** Effects of all inputs on all outputs of a plain function, as block 0, on the calling thread: eq. (U-1). */
+    public static Effects ofFunction(Model function, int outputs, InputList inputs) {
+        return run(new OneBlock(function, inputs.size(), outputs), inputs, 1, () -> false, share -> {});
+    }
+
     /**
      * Effects of all inputs on all blocks.
      *
@@ -106,13 +114,14 @@ public final class CompositePropagation {
 
     /** What one input does to the arguments of every block it reaches. */
     private void move(int input) {
-        double step = inputs.get(input).u();
+        double u = inputs.get(input).u();
+        double step = Math.max(u, FLOOR_ULPS * Math.ulp(best[input]));
         double[] up = best.clone();
         double[] down = best.clone();
         up[input] = best[input] + step;
         down[input] = best[input] - step;
-        double raised = (up[input] - best[input]) / step; // after rounding
-        double lowered = (best[input] - down[input]) / step;
+        double raised = (up[input] - best[input]) / u; // after rounding
+        double lowered = (best[input] - down[input]) / u;
         CompositeModel.At above = model.at(up);
         CompositeModel.At below = model.at(down);
         for (int b : model.blocksOf(input)) {
@@ -174,8 +183,9 @@ public final class CompositePropagation {
         return step;
     }
 
-    private void perturb(int b, int j, double step, double[] value, double[][] gain, double[][] bend) {
+    private void perturb(int b, int j, double u, double[] value, double[][] gain, double[][] bend) {
         int n = value.length;
+        double step = Math.max(u, FLOOR_ULPS * Math.ulp(centre[b][j]));
         double[] arguments = centre[b].clone();
         double[] high = new double[n];
         double[] low = new double[n];
@@ -188,8 +198,8 @@ public final class CompositePropagation {
         gain[j] = new double[n];
         bend[j] = new double[n];
         for (int o = 0; o < n; o++) {
-            gain[j][o] = effect(value[o], high[o], low[o], up, down) * step;
-            bend[j][o] = 0.5 * Math.abs(high[o] + low[o] - 2.0 * value[o]);
+            gain[j][o] = effect(value[o], high[o], low[o], up, down) * u;
+            bend[j][o] = 0.5 * Math.abs(high[o] + low[o] - 2.0 * value[o]) * (u / up) * (u / down);
         }
     }
 
@@ -264,6 +274,41 @@ public final class CompositePropagation {
         synchronized void add(double part) {
             done += part;
             progress.accept(Math.min(1.0, done / total));
+        }
+    }
+
+    /** A plain function seen as one block whose arguments are the inputs. */
+    private record OneBlock(Model function, int inputs, int outputCount) implements CompositeModel {
+        private static final int[] BLOCK = {0};
+
+        @Override
+        public int blocks() {
+            return 1;
+        }
+
+        @Override
+        public int arguments(int block) {
+            return inputs;
+        }
+
+        @Override
+        public int outputs(int block) {
+            return outputCount;
+        }
+
+        @Override
+        public int[] blocksOf(int input) {
+            return BLOCK;
+        }
+
+        @Override
+        public At at(double[] in) {
+            return (block, arguments) -> System.arraycopy(in, 0, arguments, 0, in.length);
+        }
+
+        @Override
+        public void evaluate(int block, double[] arguments, double[] out) {
+            function.evaluate(arguments, out);
         }
     }
 }

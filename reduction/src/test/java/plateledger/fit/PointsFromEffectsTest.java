@@ -5,17 +5,17 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import plateledger.uncertainty.CompositeModel;
+import plateledger.uncertainty.CompositePropagation;
 import plateledger.uncertainty.Distribution;
 import plateledger.uncertainty.Effects;
 import plateledger.uncertainty.Input;
 import plateledger.uncertainty.InputList;
-import plateledger.uncertainty.Propagation;
 import plateledger.uncertainty.Scope;
-import plateledger.uncertainty.SparseModel;
 
 final class PointsFromEffectsTest {
     /** Three runs: Re = gain · speed, Nu = Re^0.5 (1 + zero), Pr = 0.7; the zero of a day reaches run 2 alone. */
-    private static final class Runs implements SparseModel {
+    private static final class Runs implements CompositeModel {
         @Override
         public int inputs() {
             return 5;
@@ -37,9 +37,23 @@ final class PointsFromEffectsTest {
         }
 
         @Override
-        public void evaluateBlock(int block, double[] in, double[] out) {
-            out[0] = in[0] * in[1 + block];
-            out[1] = Math.sqrt(out[0]) * (block == 2 ? 1.0 + in[4] : 1.0);
+        public int arguments(int block) {
+            return 3;
+        }
+
+        @Override
+        public At at(double[] in) {
+            return (block, arguments) -> {
+                arguments[0] = in[0];
+                arguments[1] = in[1 + block];
+                arguments[2] = block == 2 ? in[4] : 0.0;
+            };
+        }
+
+        @Override
+        public void evaluate(int block, double[] arguments, double[] out) {
+            out[0] = arguments[0] * arguments[1];
+            out[1] = Math.sqrt(out[0]) * (1.0 + arguments[2]);
             out[2] = 0.7;
         }
     }
@@ -56,7 +70,7 @@ final class PointsFromEffectsTest {
         list.add(input("R2/speed", 2e5, 200.0, 20.0, Scope.run("R2")));
         list.add(input("R3/speed", 4e5, 400.0, 20.0, Scope.run("R3")));
         list.add(input("zero", 0.0, 0.003, 5.0, Scope.day("2026-03-11")));
-        Effects effects = Propagation.run(new Runs(), list.build(), 1, () -> false, fraction -> {});
+        Effects effects = CompositePropagation.run(new Runs(), list.build(), 1, () -> false, fraction -> {});
         FitProblem problem = PointsFromEffects.problem(
                 "product",
                 1.0 / 3.0,

@@ -130,8 +130,8 @@ final class ArgumentPerturbationTest {
         }
     }
 
-    /** The same function in one step. */
-    private record Plain(Curved curved) implements SparseModel {
+    /** The same function in one step: the inputs are the arguments. */
+    private record Plain(Curved curved) implements CompositeModel {
         @Override
         public int inputs() {
             return curved.inputs();
@@ -140,6 +140,11 @@ final class ArgumentPerturbationTest {
         @Override
         public int blocks() {
             return curved.blocks();
+        }
+
+        @Override
+        public int arguments(int block) {
+            return curved.inputs();
         }
 
         @Override
@@ -153,9 +158,14 @@ final class ArgumentPerturbationTest {
         }
 
         @Override
-        public void evaluateBlock(int block, double[] in, double[] out) {
+        public CompositeModel.At at(double[] in) {
+            return (block, arguments) -> System.arraycopy(in, 0, arguments, 0, in.length);
+        }
+
+        @Override
+        public void evaluate(int block, double[] arguments, double[] out) {
             double[] a = new double[2];
-            Curved.first(block, in, a);
+            Curved.first(block, arguments, a);
             Curved.second(a, out);
         }
     }
@@ -202,7 +212,7 @@ final class ArgumentPerturbationTest {
         Curved model = new Curved();
         InputList inputs = Curved.list(scale);
         Effects composite = run(model, inputs, 1);
-        Effects plain = Propagation.run(new Plain(model), inputs, 1, () -> false, share -> {});
+        Effects plain = CompositePropagation.run(new Plain(model), inputs, 1, () -> false, share -> {});
         double largest = 0.0;
         for (int b = 0; b < model.blocks(); b++) {
             for (int o = 0; o < 2; o++) {

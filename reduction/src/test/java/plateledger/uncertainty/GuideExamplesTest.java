@@ -41,7 +41,7 @@ final class GuideExamplesTest {
                 input("theta", -0.1, 0.2, INF),
                 input("Delta", 0.0, 0.35, INF),
                 input("delta_theta", 0.0, uDeltaTheta, 2.0));
-        return Propagation.jacobianTimesU(
+        return CompositePropagation.ofFunction(
                 (in, out) -> out[0] = in[0] + in[1] + in[2] + in[3] - in[0] * (in[5] * (in[6] + in[7]) + in[4] * in[8]),
                 1,
                 inputs);
@@ -117,7 +117,7 @@ final class GuideExamplesTest {
             double[][] a = cholesky(covariance);
             InputList sources =
                     list(input("z1", 0.0, 1.0, 4.0), input("z2", 0.0, 1.0, 4.0), input("z3", 0.0, 1.0, 4.0));
-            Effects effects = Propagation.jacobianTimesU(
+            Effects effects = CompositePropagation.ofFunction(
                     (z, out) -> {
                         double v = mean[0] + a[0][0] * z[0];
                         double i = mean[1] + a[1][0] * z[0] + a[1][1] * z[1];
@@ -158,7 +158,7 @@ final class GuideExamplesTest {
             for (int k = 0; k < t.length; k++) {
                 readings[k] = input("b" + k, b[k], s, INF);
             }
-            Effects effects = Propagation.jacobianTimesU(
+            Effects effects = CompositePropagation.ofFunction(
                     (in, out) -> {
                         double meanT = 0.0;
                         double meanB = 0.0;
@@ -217,7 +217,7 @@ final class GuideExamplesTest {
                 input("x2", 0.0, 1.0, INF),
                 input("x3", 0.0, 1.0, INF),
                 input("x4", 0.0, last, INF));
-        return Propagation.jacobianTimesU((in, out) -> out[0] = in[0] + in[1] + in[2] + in[3], 1, inputs)
+        return CompositePropagation.ofFunction((in, out) -> out[0] = in[0] + in[1] + in[2] + in[3], 1, inputs)
                 .combined(0, 0);
     }
 
@@ -232,7 +232,7 @@ final class GuideExamplesTest {
                     input("rho_a", 1.20, 0.10 / ROOT3, INF),
                     input("rho_W", 8000.0, 1000.0 / ROOT3, INF),
                     input("rho_R", 8000.0, 50.0 / ROOT3, INF));
-            Effects effects = Propagation.jacobianTimesU(
+            Effects effects = CompositePropagation.ofFunction(
                     (in, out) ->
                             out[0] = (in[0] + in[1]) * (1.0 + (in[2] - 1.2) * (1.0 / in[3] - 1.0 / in[4])) - 100000.0,
                     1,
@@ -250,7 +250,8 @@ final class GuideExamplesTest {
     @Test
     void curvatureShowsTheBlindSpotOf101Clause94() {
         InputList inputs = list(input("x1", 0.0, 0.005, INF), input("x2", 0.0, 0.005, INF));
-        Effects effects = Propagation.jacobianTimesU((in, out) -> out[0] = in[0] * in[0] + in[1] * in[1], 1, inputs);
+        Effects effects =
+                CompositePropagation.ofFunction((in, out) -> out[0] = in[0] * in[0] + in[1] * in[1], 1, inputs);
         assertEquals(0.0, effects.combined(0, 0).u(), 0.0);
         assertEquals(25e-6, effects.curvature(0, 0, 0), 1e-11);
         assertTrue(

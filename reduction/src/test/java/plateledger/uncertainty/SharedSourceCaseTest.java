@@ -30,7 +30,7 @@ final class SharedSourceCaseTest {
         for (int s = 0; s < amplitudes.length; s++) {
             builder.add(unit("z" + s));
         }
-        return Propagation.jacobianTimesU(
+        return CompositePropagation.ofFunction(
                                 (z, out) -> {
                                     double[] x = BEST.clone();
                                     for (int s = 0; s < z.length; s++) {
