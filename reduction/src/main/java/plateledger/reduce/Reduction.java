@@ -21,6 +21,8 @@ import plateledger.safety.SafetyChecks;
 
 /** The pipeline: campaign folder to results. Reads files, writes none. */
 public final class Reduction {
+    private static final String NOT_USED = "a cool-down is kept and checked, not used";
+
     private Reduction() {}
 
     /** Files of a campaign that a reduction reads, relative to its folder with '/' separators, sorted. */
@@ -48,7 +50,7 @@ public final class Reduction {
         List<RunResult> states = new ArrayList<>();
         for (Run run : read.campaign.runs()) {
             RunLogs logs = read.logs.get(run.id());
-            if (logs != null) {
+            if (logs != null && used(run)) {
                 WindowStage.Outcome outcome = stage.find(logs);
                 findings.addAll(outcome.findings());
                 states.add(new RunResult(
@@ -86,11 +88,13 @@ public final class Reduction {
             if (progress.cancelled()) {
                 throw new CancelledException();
             }
-            WindowStage.Outcome outcome = stage.find(logs);
-            outcomes.put(logs.run().id(), outcome);
-            findings.addAll(outcome.findings());
-            outcome.means().ifPresent(means::add);
-            progress.step("finding steady windows", (double) outcomes.size() / read.logs.size());
+            if (used(logs.run())) {
+                WindowStage.Outcome outcome = stage.find(logs);
+                outcomes.put(logs.run().id(), outcome);
+                findings.addAll(outcome.findings());
+                outcome.means().ifPresent(means::add);
+                progress.step("finding steady windows", (double) outcomes.size() / read.logs.size());
+            }
         }
         MeansReduction reduced = MeansReduction.of(campaign, means, options.threads(), progress);
         List<RunResult> runs = campaign.runs().stream()
@@ -124,10 +128,18 @@ public final class Reduction {
                 Optional.ofNullable(reduced.values().get(run.id())));
     }
 
-    /** A run that was not read: planned, left out, or not asked for. */
-    private static RunResult idle(Run run, ReductionOptions options) {
+    /** False for a run that is never steady and feeds no result: its logs are checked and that is all. */
+    private static boolean used(Run run) {
+        return run.type() != RunType.COOL_DOWN;
+    }
+
+    /** A run that is not reduced: planned, left out, not used, or not asked for. */
+    static RunResult idle(Run run, ReductionOptions options) {
         if (run.leftOut().isPresent()) {
             return new RunResult(run, RunState.LEFT_OUT, run.leftOut().get(), Optional.empty(), Optional.empty());
+        }
+        if (!used(run) && !run.planned()) {
+            return new RunResult(run, RunState.LEFT_OUT, NOT_USED, Optional.empty(), Optional.empty());
         }
         RunState state = run.planned() || asked(run, options) ? RunState.PLANNED : RunState.WAITING;
         return new RunResult(run, state, "", Optional.empty(), Optional.empty());

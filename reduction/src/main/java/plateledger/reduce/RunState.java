@@ -10,7 +10,7 @@ public enum RunState {
     REDUCED("reduced"),
     /** No steady window found. */
     NOT_STEADY("not steady"),
-    /** Left out by a person, with a reason. */
+    /** Takes no part, with a reason: a person said so, or its type is not used. */
     LEFT_OUT("left out"),
     /** Input cannot be used. */
     REFUSED("refused"),

@@ -6,14 +6,11 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
 import java.util.Map;
-import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.CampaignReader;
-import plateledger.campaign.Regime;
-import plateledger.campaign.Run;
 import plateledger.campaign.RunType;
-import plateledger.finding.Place;
+import plateledger.finding.RefusedException;
 import plateledger.quantity.Estimate;
 import plateledger.uncertainty.InputList;
 
@@ -28,29 +25,14 @@ final class InputBookTest {
         try {
             return CampaignReader.read(Path.of("src/test/resources/plateledger/campaign/example"))
                     .campaign();
-        } catch (plateledger.finding.RefusedException e) {
+        } catch (RefusedException e) {
             throw new IllegalStateException(e);
         }
     }
 
     private RunMeans means(String id, RunType type) {
-        Run run = new Run(
-                id,
-                type,
-                "2026-03-10",
-                campaign.rig().plates().get(0).id(),
-                Regime.LAMINAR,
-                Optional.empty(),
-                4.0,
-                0.0,
-                "",
-                Map.of(),
-                Optional.empty(),
-                Optional.empty(),
-                "",
-                Place.NOWHERE);
         return RunMeans.balanced(
-                run,
+                TestRuns.planned(id, type),
                 Map.of(air, Estimate.of(295.0, 0.001), speed, Estimate.of(9.0, 0.01)),
                 Estimate.of(0.0, 0.0),
                 new double[0],
