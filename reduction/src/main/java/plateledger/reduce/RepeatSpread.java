@@ -9,7 +9,7 @@ import java.util.List;
  * @param set set point
  * @param runs its runs
  * @param relativeSpread standard deviation of ln Nu_L within the set, slope removed
- * @param expectedSpread what the run-scope uncertainties predict
+ * @param expectedSpread what the uncertainties predict of sources that do not move the repeats alike
  */
 public record RepeatSpread(String plate, String set, List<String> runs, double relativeSpread, double expectedSpread) {
     /** Copies the list. */

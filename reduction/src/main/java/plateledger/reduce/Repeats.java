@@ -1,6 +1,7 @@
 package plateledger.reduce;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -10,9 +11,13 @@ import plateledger.campaign.Regime;
 import plateledger.fit.FitPoint;
 import plateledger.fit.FitProblem;
 import plateledger.fit.FitResult;
+import plateledger.fit.SharedSource;
 import plateledger.rig.Plate;
 
-/** Recognises repeated set points and compares their spread with what the run-scope uncertainties predict. */
+/**
+ * Recognises repeated set points and compares their spread with the one expected: the random parts, and of shared sources
+ * what they do unlike to the repeats (the drift of another day). A source that moves all alike adds nothing.
+ */
 final class Repeats {
     /** Slope used to carry a point to its neighbour's Re where no fit was made: between ½ and ⅘ (common practice). */
     private static final double MIDDLE_SLOPE = 0.65;
@@ -34,7 +39,7 @@ final class Repeats {
                 double slope = slope(campaign, plate.id(), regime, fits);
                 sets.forEach((set, points) -> {
                     if (points.size() > 1) {
-                        spreads.add(spread(plate.id(), set, points, slope, problem.prandtlExponent()));
+                        spreads.add(spread(plate.id(), set, points, slope, problem));
                     }
                 });
             }
@@ -51,30 +56,36 @@ final class Repeats {
                 .orElse(MIDDLE_SLOPE);
     }
 
-    /** One set point: ln(Nu/Pr^n) − m ln Re of each point, its standard deviation and what the random parts predict. */
-    static RepeatSpread spread(String plate, String set, List<FitPoint> points, double m, double n) {
+    /** One set point: ln(Nu/Pr^n) − m ln Re of each point, its standard deviation and the one expected. */
+    static RepeatSpread spread(String plate, String set, List<FitPoint> points, double m, FitProblem problem) {
+        double n = problem.prandtlExponent();
         double[] y = points.stream()
                 .mapToDouble(p -> Math.log(p.nu()) - n * Math.log(p.pr()) - m * Math.log(p.re()))
                 .toArray();
-        double mean = 0.0;
         double expected = 0.0;
-        for (int i = 0; i < y.length; i++) {
-            mean += y[i] / y.length;
-            FitPoint p = points.get(i);
+        for (FitPoint p : points) {
             expected += (p.uLnYRandom() * p.uLnYRandom()
                             + m * m * p.uLnReRandom() * p.uLnReRandom()
                             - 2.0 * m * p.correlationRandom() * p.uLnReRandom() * p.uLnYRandom())
                     / y.length;
         }
-        double square = 0.0;
-        for (double v : y) {
-            square += (v - mean) * (v - mean);
+        int[] at = points.stream().mapToInt(problem.points()::indexOf).toArray();
+        for (SharedSource source : problem.sources()) {
+            expected += variance(Arrays.stream(at)
+                    .mapToDouble(i -> source.dLnY()[i] - m * source.dLnRe()[i])
+                    .toArray());
         }
         return new RepeatSpread(
                 plate,
                 set,
                 points.stream().map(FitPoint::id).toList(),
-                Math.sqrt(square / (y.length - 1)),
+                Math.sqrt(variance(y)),
                 Math.sqrt(Math.max(0.0, expected)));
+    }
+
+    /** Σ(v − mean)²/(n − 1). */
+    private static double variance(double[] v) {
+        double mean = Arrays.stream(v).sum() / v.length;
+        return Arrays.stream(v).map(a -> (a - mean) * (a - mean)).sum() / (v.length - 1);
     }
 }
