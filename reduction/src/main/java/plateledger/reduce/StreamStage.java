@@ -77,33 +77,42 @@ final class StreamStage {
     }
 
     /**
-     * Chooses the meter: the first whose range holds the set speed (or, without one, its own indication); empty if none
-     * was read.
+     * Chooses the meter: the first whose range holds the set speed, else the one whose range comes nearest; of those that
+     * were read, and empty if none was. Without a set speed the first.
      */
     static Optional<StreamStage> choose(
             InputBook book, Rig rig, RunIndex run, InputBook.TunnelIndex tunnel, List<RunMeans> zeros) {
         List<Surroundings.SpeedMeter> meters = rig.surroundings().speedMeters();
-        Optional<StreamStage> fallback = Optional.empty();
-        double set = run.means.run().speedSetMPerS();
+        int best = -1;
+        double nearest = Double.POSITIVE_INFINITY;
         for (int i = 0; i < meters.size(); i++) {
-            Surroundings.SpeedMeter meter = meters.get(i);
-            Optional<Signal> signal = book.signal(run.means, meter.channel());
-            if (signal.isEmpty()) {
-                continue;
+            double away = away(meters.get(i), run.means.run().speedSetMPerS());
+            if (run.means.means().containsKey(meters.get(i).channel()) && (best < 0 || away < nearest)) {
+                best = i;
+                nearest = away;
             }
-            StreamStage stage = new StreamStage(
-                    run,
-                    tunnel,
-                    signal.get(),
-                    i,
-                    meter.principle() == Surroundings.SpeedPrinciple.PITOT,
-                    fanOff(book, run.means, meter.channel(), zeros));
-            if (set >= meter.fromMPerS() && set < meter.toMPerS()) {
-                return Optional.of(stage);
-            }
-            fallback = fallback.isPresent() ? fallback : Optional.of(stage);
         }
-        return fallback;
+        if (best < 0) {
+            return Optional.empty();
+        }
+        int chosen = best;
+        Surroundings.SpeedMeter meter = meters.get(chosen);
+        return book.signal(run.means, meter.channel())
+                .map(signal -> new StreamStage(
+                        run,
+                        tunnel,
+                        signal,
+                        chosen,
+                        meter.principle() == Surroundings.SpeedPrinciple.PITOT,
+                        fanOff(book, run.means, meter.channel(), zeros)));
+    }
+
+    /** How far a speed lies outside a meter's range, m/s; below 0 inside, so that the end of a range comes second. */
+    static double away(Surroundings.SpeedMeter meter, double setMPerS) {
+        if (setMPerS >= meter.fromMPerS() && setMPerS < meter.toMPerS()) {
+            return -1.0;
+        }
+        return Math.max(meter.fromMPerS() - setMPerS, setMPerS - meter.toMPerS());
     }
 
     /** True if the meter's zero was taken with the fan off. */

@@ -55,7 +55,7 @@ final class WindowStage {
      * @param window the window, or the best attempt's evidence is in the reason
      * @param means means, if there is a window
      * @param reason why there is none; empty otherwise
-     * @param findings channels lost in the window
+     * @param findings channels lost in the window, tests that a declared window fails
      */
     record Outcome(Optional<SteadyWindow> window, Optional<RunMeans> means, String reason, List<Finding> findings) {}
 
@@ -89,11 +89,12 @@ final class WindowStage {
         }
         SteadyWindow window = outcome.window().get();
         List<Finding> findings = new ArrayList<>();
+        declared(run, window).ifPresent(findings::add);
         Set<String> lost = lost(run, logs, window, findings);
         return new Outcome(Optional.of(window), Optional.of(means(logs, plate, window, lost, power)), "", findings);
     }
 
-    /** Fan-off zeros are short by nature: three minutes (design of the method), everything else as declared. */
+    /** Fan-off zeros are short by nature: two minutes and one before (common practice); all else as declared. */
     private double minimum(Run run) {
         return run.type() == RunType.FAN_OFF_ZERO ? 120.0 : campaign.steady().minimumS();
     }
@@ -281,31 +282,66 @@ final class WindowStage {
         return n > 0 ? sum / n : 0.0;
     }
 
+    /** A window that a person chose counts, but not in silence where it fails what a found one must pass. */
+    private static Optional<Finding> declared(Run run, SteadyWindow window) {
+        List<String> failed = window.evidence().stream()
+                .filter(e -> !e.passed())
+                .map(e -> e.test() + " of " + e.subject())
+                .toList();
+        if (!window.declared() || failed.isEmpty()) {
+            return Optional.empty();
+        }
+        return Optional.of(new Finding(
+                "WINDOW-DECLARED",
+                Level.CAUTION,
+                run.place(),
+                "run " + run.id() + ", declared window",
+                "fails " + failed.size() + " tests of steadiness, first: " + failed.get(0),
+                "a window that passes all",
+                "Leave the choice to the evidence, or say in the reason why this window may be used.",
+                ""));
+    }
+
     private Set<String> lost(Run run, RunLogs logs, SteadyWindow window, List<Finding> findings) {
         Set<String> lost = new HashSet<>();
         for (String name : ExpectedChannels.of(campaign, run)) {
-            Optional<ChannelMean> mean = window.mean(name);
-            int all = mean.map(m -> m.samples() + m.excluded()).orElse(0);
-            double share = all == 0 ? 1.0 : (double) mean.orElseThrow().excluded() / all;
-            if (share > LOST_SHARE || mean.map(m -> !Double.isFinite(m.mean())).orElse(true)) {
+            Optional<Series> series = Optional.ofNullable(logs.series().get(name));
+            double share =
+                    series.map(s -> unusable(s, window.startS(), window.endS())).orElse(1.0);
+            if (share > LOST_SHARE
+                    || window.mean(name).map(m -> !Double.isFinite(m.mean())).orElse(true)) {
                 lost.add(name);
-                Series series = logs.series().get(name);
                 findings.add(new Finding(
                         "CHANNEL-LOST",
                         Level.CAUTION,
                         run.place(),
                         "run " + run.id() + ", channel " + name,
-                        String.format(
-                                Locale.ROOT,
-                                "%.0f %% of its samples in the window are not usable%s",
-                                100.0 * share,
-                                series == null ? "" : " (" + series.file() + ")"),
+                        (share > LOST_SHARE
+                                        ? String.format(
+                                                Locale.ROOT,
+                                                "%.0f %% of its samples in the window are not usable",
+                                                100.0 * share)
+                                        : "too few samples in the window for a mean")
+                                + series.map(s -> " (" + s.file() + ")").orElse(""),
                         String.format(Locale.ROOT, "at most %.0f %%", 100.0 * LOST_SHARE),
                         "It is left out of this run; repair it before the next.",
                         ""));
             }
         }
         return lost;
+    }
+
+    /** Share of a channel's samples within a window that are not valid; 1 if there are none at all. */
+    static double unusable(Series series, double fromS, double toS) {
+        int all = 0;
+        int bad = 0;
+        for (int k = 0; k < series.size(); k++) {
+            if (series.timesS()[k] >= fromS && series.timesS()[k] <= toS) {
+                all++;
+                bad += series.flags()[k] == Series.Flag.VALID.code() ? 0 : 1;
+            }
+        }
+        return all == 0 ? 1.0 : (double) bad / all;
     }
 
     private RunMeans means(
