@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import plateledger.campaign.Campaign;
+import plateledger.campaign.Run;
 import plateledger.campaign.RunType;
 import plateledger.fluid.MoistAir;
 import plateledger.ledger.RunLayout;
@@ -153,21 +154,34 @@ final class CampaignModel implements CompositeModel {
                 }
             }
         }
+        lossRuns.forEach(run -> warn(run, zeros, warnings));
         List<LossStage> losses = lossStages(lossRuns, zeros);
         List<HeatedStage> heated = new ArrayList<>();
         for (Streamed run : streamed) {
             RunIndex index = run.index();
-            int zero = zeroOf(index, zeros);
-            if (zero < 0) {
-                warnings.merge(
-                        index.means.run().id(),
-                        "no zero run of its plate: offsets by certificate",
-                        (a, b) -> a + "; " + b);
-            }
-            heated.add(new HeatedStage(campaign, index, run.stream(), tunnel, zero, lossOf(index.plate.id(), losses)));
+            warn(index, zeros, warnings);
+            heated.add(new HeatedStage(
+                    campaign, index, run.stream(), tunnel, zeroOf(index, zeros), lossOf(index.plate.id(), losses)));
         }
         CampaignModel model = new CampaignModel(book.build(), zeros, losses, heated);
         return new Built(model, refused, warnings);
+    }
+
+    /** Says so where a run's junctions have no zero of its own day; the drift from another day is in no uncertainty. */
+    private static void warn(RunIndex run, List<ZeroStage> zeros, Map<String, String> warnings) {
+        int zero = zeroOf(run, zeros);
+        Run its = run.means.run();
+        if (zero < 0) {
+            warnings.merge(its.id(), "no zero run of its plate: offsets by certificate", (a, b) -> a + "; " + b);
+            return;
+        }
+        Run used = zeros.get(zero).index().means.run();
+        if (!used.day().equals(its.day())) {
+            warnings.merge(
+                    its.id(),
+                    "no zero run of its plate on that day: offsets of " + used.id() + ", " + used.day(),
+                    (a, b) -> a + "; " + b);
+        }
     }
 
     /** A heated run with its stream. */

@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Optional;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.Definitions;
-import plateledger.campaign.Regime;
 import plateledger.campaign.Run;
 import plateledger.ledger.RunLayout;
 import plateledger.ledger.RunModel;
@@ -77,7 +76,7 @@ final class HeatedStage {
         };
         return new RunSetting(
                 index.plate,
-                run.regime() == Regime.LAMINAR && run.trip().isEmpty() ? RunSetting.Flow.LAMINAR : flow,
+                flow,
                 run.trip().map(Run.Trip::xM),
                 d.properties() == Definitions.PropertyTemperature.FILM,
                 d.length() == Definitions.ReferenceLength.LEADING_EDGE,

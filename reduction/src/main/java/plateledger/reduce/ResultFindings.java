@@ -5,6 +5,9 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.apache.commons.math3.distribution.ChiSquaredDistribution;
 import plateledger.campaign.Campaign;
 import plateledger.campaign.Run;
@@ -14,6 +17,7 @@ import plateledger.finding.Level;
 import plateledger.finding.Place;
 import plateledger.ledger.PlateScales;
 import plateledger.quantity.Estimate;
+import plateledger.rig.Plate;
 import plateledger.rig.Surroundings;
 
 /** What the finished numbers themselves say that is doubtful. */
@@ -38,6 +42,8 @@ final class ResultFindings {
         reduced.warnings().forEach((id, what) -> f.warning(campaign, id, what));
         means.stream().filter(m -> m.run().type() == RunType.ZERO).forEach(m -> f.zeroRun(campaign, m));
         reduced.values().forEach((id, v) -> campaign.run(id).ifPresent(run -> f.run(run, v)));
+        means.forEach(m ->
+                Optional.ofNullable(reduced.values().get(m.run().id())).ifPresent(v -> f.stationsLeft(campaign, m, v)));
         reduced.losses().forEach(f::loss);
         reduced.repeats().forEach(f::repeat);
         f.geometry(campaign, reduced);
@@ -144,6 +150,29 @@ final class ResultFindings {
         }
     }
 
+    /** Stations that were read and are not in the results. */
+    private void stationsLeft(Campaign campaign, RunMeans means, RunResult.Values v) {
+        Set<String> reported = v.stations().stream().map(StationResult::channel).collect(Collectors.toSet());
+        String left = campaign.rig().plate(means.run().plate()).stream()
+                .flatMap(plate -> plate.stations().stream())
+                .map(Plate.Thermocouple::channel)
+                .filter(channel -> means.means().containsKey(channel) && !reported.contains(channel))
+                .collect(Collectors.joining(", "));
+        if (!left.isEmpty()) {
+            add(
+                    "STATION-NOT-REPORTED",
+                    Level.NOTE,
+                    means.run().place(),
+                    "run " + means.run().id(),
+                    left,
+                    number(
+                            "a zero of the junction, heat that flows to the stream and |T_s − T_ref| of %.0f"
+                                    + " standard uncertainties",
+                            ValuesBuilder.LEAST_DIFFERENCE),
+                    "Heat more, or take the zero again; the run's average stands.");
+        }
+    }
+
     private void loss(LossResult loss) {
         for (LossResult.Parameter p : loss.parameters()) {
             if (p.prior().u() > 0.0 && p.uRatio() > NOT_INFORMED) {
@@ -167,7 +196,9 @@ final class ResultFindings {
                     Place.NOWHERE,
                     "set point " + r.set() + " of " + r.plate() + " (" + String.join(", ", r.runs()) + ")",
                     number("spread %.2f %%", 100.0 * r.relativeSpread()),
-                    number("about %.2f %% from the run's own uncertainties", 100.0 * r.expectedSpread()),
+                    number(
+                            "about %.2f %% from the uncertainties that may differ between them",
+                            100.0 * r.expectedSpread()),
                     "Something changed between the repeats that the ledger does not know.");
         }
     }

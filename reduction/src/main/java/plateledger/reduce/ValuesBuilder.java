@@ -22,6 +22,9 @@ final class ValuesBuilder {
     /** Budget lines below this share of the variance are left to the sum, %. */
     private static final double SMALLEST_SHARE = 0.01;
 
+    /** h of a station is given only where |T_s − T_ref| is at least so many of its standard uncertainties. */
+    static final double LEAST_DIFFERENCE = 5.0;
+
     private static final Map<LedgerTerm, Out> TERMS = Map.ofEntries(
             Map.entry(LedgerTerm.ELECTRICAL, Out.Q_ELECTRICAL),
             Map.entry(LedgerTerm.CONVECTION, Out.Q_CONVECTION),
@@ -116,11 +119,23 @@ final class ValuesBuilder {
         List<StationResult> list = new ArrayList<>();
         List<Plate.Thermocouple> stations = model.index(block).plate.stations();
         for (int j = 0; j < stations.size(); j++) {
-            if (Double.isFinite(effects.value(block, layout.at(j, StationOut.H)))) {
+            if (reported(j)) {
                 list.add(station(j, stations.get(j).channel(), regime));
             }
         }
         return list;
+    }
+
+    /** True if h is known there: T_s − T_ref stands clear of its uncertainty and heat flows the way it drives. */
+    private boolean reported(int j) {
+        int surface = layout.at(j, StationOut.SURFACE);
+        int reference = layout.at(j, StationOut.REFERENCE);
+        double difference = Math.abs(effects.value(block, surface) - effects.value(block, reference));
+        double variance = effects.covariance(block, surface, block, surface)
+                + effects.covariance(block, reference, block, reference)
+                - 2.0 * effects.covariance(block, surface, block, reference);
+        return effects.value(block, layout.at(j, StationOut.H)) > 0.0
+                && difference * difference >= LEAST_DIFFERENCE * LEAST_DIFFERENCE * variance;
     }
 
     private StationResult station(int j, String channel, Regime regime) {
