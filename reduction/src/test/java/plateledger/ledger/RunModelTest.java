@@ -122,8 +122,13 @@ final class RunModelTest {
         for (int p = 0; p < l.junctions(); p++) {
             twice[l.reading(p)] = taw + 2.0 * (in[l.reading(p)] - taw);
         }
+        // the smoothing weighs readings by their uncertainty, so that scales too
+        double[] doubled = new double[l.junctions()];
+        Arrays.fill(doubled, 2.0 * SIGMA_K);
+        RunSetting scaled =
+                new RunSetting(plate, RunSetting.Flow.PRODUCT, Optional.empty(), true, true, true, doubled);
         double[] other = new double[l.outputs()];
-        model.evaluate(twice, other);
+        RunModel.configure(scaled, twice).evaluate(twice, other);
         assertEquals(out[l.at(Out.H)], other[l.at(Out.H)], 1e-6 * out[l.at(Out.H)]);
         assertTrue(out[l.at(Out.H)] > 10.0);
     }
