@@ -125,8 +125,7 @@ final class RunModelTest {
         // the smoothing weighs readings by their uncertainty, so that scales too
         double[] doubled = new double[l.junctions()];
         Arrays.fill(doubled, 2.0 * SIGMA_K);
-        RunSetting scaled =
-                new RunSetting(plate, RunSetting.Flow.PRODUCT, Optional.empty(), true, true, true, doubled);
+        RunSetting scaled = new RunSetting(plate, RunSetting.Flow.PRODUCT, Optional.empty(), true, true, true, doubled);
         double[] other = new double[l.outputs()];
         RunModel.configure(scaled, twice).evaluate(twice, other);
         assertEquals(out[l.at(Out.H)], other[l.at(Out.H)], 1e-6 * out[l.at(Out.H)]);
