@@ -80,7 +80,7 @@ final class CommandLineProgramTest {
     void aTypingErrorGetsAHintAndStatusTwo() {
         Said said = run("propertis", "--fluid", "air");
         assertEquals(2, said.status);
-        assertTrue(said.err.contains("Did you mean: properties"), said.err);
+        assertTrue(said.err.contains("Did you mean: plateledger properties"), said.err);
         assertEquals("", said.out);
         Said option = run("properties", "--flud", "air");
         assertEquals(2, option.status);

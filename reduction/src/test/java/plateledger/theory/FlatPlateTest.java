@@ -208,7 +208,7 @@ final class FlatPlateTest {
         assertTrue(Double.isNaN(FlatPlate.uniformTemperature(TURBULENT, 0.0, 0.7)));
         assertTrue(Double.isNaN(UnheatedLength.averageTemperatureFactor(LAMINAR, 1.0)));
         assertEquals(
-                Correlation.ALL.size(),
+                (long) Correlation.ALL.size(),
                 Correlation.ALL.stream().map(Correlation::name).distinct().count());
     }
 }
