@@ -15,8 +15,8 @@ import plateledger.reduce.Reduction;
         name = "check",
         mixinStandardHelpOptions = true,
         description = {
-            "Reads and checks everything of a campaign and lists all findings at once. Reduces nothing and writes",
-            "nothing. Of many findings of one kind the first are shown; --all shows each."
+            "Reads and checks everything of a campaign, reduces and writes nothing.",
+            "All findings are listed at once. Of many of one kind the first are shown; --all shows each."
         },
         footerHeading = "%nExamples:%n",
         footer = {

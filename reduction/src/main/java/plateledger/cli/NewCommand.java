@@ -27,8 +27,8 @@ import plateledger.log.LogReader;
         name = "new",
         mixinStandardHelpOptions = true,
         description = {
-            "Writes a commented campaign skeleton into a new folder. From given logs it fills in how they are",
-            "written and which columns they hold."
+            "Writes a commented campaign skeleton into a new folder.",
+            "From given logs it fills in how they are written and which columns they hold."
         },
         footerHeading = "%nExamples:%n",
         footer = {

@@ -36,8 +36,8 @@ import plateledger.report.ResultFiles;
         name = "reduce",
         mixinStandardHelpOptions = true,
         description = {
-            "Reduces a campaign: from its raw logs to booked heat, h, Nu, Re and Pr with uncertainty, fitted",
-            "constants and a report. The output folder is replaced whole or left as it was."
+            "Reduces a campaign from raw logs to h, Nu, Re, Pr, fitted constants and a report.",
+            "From raw logs to booked heat, h, Nu, Re and Pr with uncertainty. The output folder is replaced whole or left as it was."
         },
         footerHeading = "%nExamples:%n",
         footer = {

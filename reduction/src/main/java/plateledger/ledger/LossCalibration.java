@@ -2,6 +2,7 @@ package plateledger.ledger;
 
 import java.util.List;
 import plateledger.ledger.RunLayout.In;
+import plateledger.numeric.SmallCholesky;
 import plateledger.rig.Plate;
 
 /**
@@ -138,7 +139,11 @@ public final class LossCalibration {
             }
         }
         double[] y = miss.clone();
-        Cholesky.solve(s, y, m);
+        if (!SmallCholesky.factor(s, m)) {
+            java.util.Arrays.fill(posterior, Double.NaN); // NaN readings: no number rather than a wrong one
+            return;
+        }
+        SmallCholesky.solve(s, m, y);
         for (int a = 0; a < N; a++) {
             double v = prior[a];
             for (int r = 0; r < m; r++) {

@@ -1,6 +1,7 @@
 package plateledger.ledger;
 
 import plateledger.ledger.RunLayout.In;
+import plateledger.numeric.SmallCholesky;
 
 /**
  * The inverse step: fits h(x) = g(x) ρ(x) to the junctions so that the sheet's own energy balance holds in every cell,
@@ -241,7 +242,11 @@ final class PlateSolver {
             for (int c = 1; c < k - 1; c++) {
                 penalise(c, strength);
             }
-            Cholesky.solve(normal, right, k);
+            if (SmallCholesky.factor(normal, k)) {
+                SmallCholesky.solve(normal, k, right);
+            } else {
+                java.util.Arrays.fill(right, Double.NaN); // shows as a run that does not converge
+            }
         }
 
         private void observe(int p) {
@@ -368,7 +373,7 @@ final class PlateSolver {
                 for (int b = 0; b < k; b++) {
                     unit[b] = b <= a ? dataNormal[a][b] : dataNormal[b][a];
                 }
-                Cholesky.substitute(normal, unit, k);
+                SmallCholesky.solve(normal, k, unit);
                 trace += unit[a];
             }
             return trace;

@@ -61,24 +61,4 @@ public final class SmallCholesky {
             b[i] = sum / factor[i][i];
         }
     }
-
-    /**
-     * The inverse A⁻¹ from the factor of {@link #factor}: a covariance from a normal matrix.
-     *
-     * @param factor L in the lower triangle
-     * @param n order
-     * @return the full symmetric inverse, n × n
-     */
-    public static double[][] inverse(double[][] factor, int n) {
-        double[][] inverse = new double[n][n];
-        for (int j = 0; j < n; j++) {
-            double[] column = new double[n];
-            column[j] = 1.0;
-            solve(factor, n, column);
-            for (int i = 0; i < n; i++) {
-                inverse[i][j] = column[i];
-            }
-        }
-        return inverse;
-    }
 }

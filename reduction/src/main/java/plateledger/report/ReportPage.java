@@ -20,6 +20,7 @@ import plateledger.campaign.Campaign;
 import plateledger.finding.Finding;
 import plateledger.finding.Level;
 import plateledger.fit.FitResult;
+import plateledger.ledger.LossTerm;
 import plateledger.reduce.CampaignResult;
 import plateledger.reduce.RunResult;
 import plateledger.reduce.RunState;
@@ -113,6 +114,7 @@ final class ReportPage {
         model.put("matrix", RunSections.matrix(result));
         model.put("averages", RunSections.averages(result));
         model.put("ledger", new LedgerSection(result).model());
+        model.put("terms", terms());
         model.put("stations", RunSections.stations(result));
         model.put("theory", ComparisonSections.theory(groups));
         model.put("losses", ComparisonSections.losses(result));
@@ -133,6 +135,13 @@ final class ReportPage {
         model.put("audit", auditTable());
         model.put("settings", settings());
         return model;
+    }
+
+    /** How each loss is booked: the texts stand with the functions that the kernel calls. */
+    private static List<Map<String, String>> terms() {
+        return LossTerm.all().stream()
+                .map(t -> Map.of("label", t.label(), "equation", t.equation(), "source", t.source()))
+                .toList();
     }
 
     private static String css() throws IOException {
